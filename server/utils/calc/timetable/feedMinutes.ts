@@ -3,7 +3,7 @@ import { feedingSpanMinutes } from './feedingSpanMinutes'
 
 /**
  * Clock times of a day's feeds: spread evenly over the feeding hours, first at their beginning and last at their end,
- * on whole five minutes.
+ * on whole five minutes (rounded down, so that no gap gets shorter than the last).
  *
  * @param input  one day:
  * @param input.feeds  number of feeds, whole, 1 or more;
@@ -19,5 +19,5 @@ export function feedMinutes(input: { feeds: number, fromMinute: number, toMinute
   const span = feedingSpanMinutes(input)
   if (feeds === 1) return [input.fromMinute]
   const every = span / (feeds - 1)
-  return Array.from({ length: feeds }, (_, index) => input.fromMinute + (index === feeds - 1 ? span : Math.round(index * every / 5) * 5))
+  return Array.from({ length: feeds }, (_, index) => input.fromMinute + (index === feeds - 1 ? span : Math.floor(index * every / 5 + 1e-9) * 5))
 }

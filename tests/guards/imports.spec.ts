@@ -1,0 +1,49 @@
+import { dirname, join, normalize } from 'node:path'
+import { describe, expect, it } from 'vitest'
+import { filesUnder, textOf } from './files'
+
+/** Folder, what it may import of our own, which packages it must not touch, and the sentence of DEVELOPERS.md. */
+const RULES: { folder: string, may: string[], notPackages: RegExp, sentence: string }[] = [
+  { folder: 'shared', may: ['shared'], notPackages: /^(?!zod$)/, sentence: 'shared/ imports only shared/ and zod.' },
+  { folder: 'server/utils/calc', may: ['server/utils/calc', 'shared'], notPackages: /^(?!mathjs)/, sentence: 'calc/ imports only calc/, shared/ and mathjs: no values, no clock, no framework.' },
+  { folder: 'server/utils/reference', may: ['server/utils/reference', 'server/utils/calc/equation', 'shared'], notPackages: /^/, sentence: 'reference/ imports only itself, the equation parser and shared/.' },
+  { folder: 'server/utils/plan', may: ['server/utils/plan', 'server/utils/calc', 'server/utils/reference', 'shared'], notPackages: /^/, sentence: 'plan/ imports calc/, reference/ and shared/.' },
+  { folder: 'server/utils/print', may: ['server/utils/print', 'shared'], notPackages: /^(?!(pdfkit|uqr|fontkit|node:.*)$)/, sentence: 'print/ imports shared/ and the PDF libraries: it computes nothing.' },
+  { folder: 'server/utils/data', may: ['server/utils/data', 'server/db', 'shared'], notPackages: /^(?!(drizzle-orm.*|node:.*|better-sqlite3)$)/, sentence: 'data/ imports db/ and shared/.' },
+  { folder: 'server/utils/access', may: ['server/utils/access', 'server/utils/data', 'server/utils/http', 'shared'], notPackages: /^(?!(h3|node:.*)$)/, sentence: 'access/ imports data/, http/, shared/ and h3.' },
+  { folder: 'server/utils/http', may: ['server/utils/http', 'server/utils/calc/calcInputError', 'shared'], notPackages: /^(?!(h3|zod|node:.*|rate-limiter-flexible|nitropack.*)$)/, sentence: 'http/ imports shared/ and h3.' },
+  { folder: 'server/api', may: ['server/utils', 'shared'], notPackages: /^(drizzle-orm|better-sqlite3)/, sentence: 'Routes import server/utils and shared/, never server/db.' },
+  ...['pages', 'components', 'composables', 'stores', 'utils', 'layouts'].map(folder => ({ folder, may: ['pages', 'components', 'composables', 'stores', 'utils', 'shared', 'assets'], notPackages: /^(drizzle-orm|better-sqlite3|mathjs|pdfkit|h3|node:)/, sentence: 'The browser imports nothing from server/, types included.' })),
+  { folder: 'components/ui', may: ['components/ui', 'utils', 'shared'], notPackages: /^(pinia)/, sentence: 'components/ui know no domain: they import utils/ and shared/.' },
+  { folder: 'stores', may: ['stores', 'utils', 'shared', 'composables'], notPackages: /^(mathjs|h3)/, sentence: 'stores/ import shared/ and utils/; no formula of any kind.' },
+]
+
+function importsOf(path: string): string[] {
+  return [...textOf(path).matchAll(/(?:^|\n)\s*(?:import|export)\s[^'"\n]*?(?:from\s*)?['"]([^'"]+)['"]|import\(['"]([^'"]+)['"]\)/g)].map(match => (match[1] ?? match[2])!)
+}
+
+/** Own imports as a path from the root; null for a package. */
+function ownPath(from: string, imported: string): string | null {
+  if (imported.startsWith('#shared/')) return imported.replace('#shared/', 'shared/')
+  if (imported.startsWith('#server/')) return imported.replace('#server/', 'server/')
+  if (/^[~@]\//.test(imported)) return imported.slice(2)
+  if (imported.startsWith('.')) return normalize(join(dirname(from), imported))
+  return null
+}
+
+describe.each(RULES)('$folder', ({ folder, may, notPackages, sentence }) => {
+  it(sentence, () => {
+    const wrong = filesUnder(folder, ['.ts', '.vue']).flatMap(path => importsOf(path).flatMap((imported) => {
+      if (imported === '#imports' || imported.startsWith('#app') || imported.startsWith('#components')) return folder.startsWith('server/utils') && folder !== 'server/utils/http' ? [`${path} imports ${imported}`] : []
+      const own = ownPath(path, imported)
+      if (own === null) return notPackages.test(imported) ? [`${path} imports ${imported}`] : []
+      return may.some(allowed => own === allowed || own.startsWith(`${allowed}/`)) ? [] : [`${path} imports ${imported}`]
+    }))
+    expect(wrong, sentence).toEqual([])
+  })
+})
+
+it('finds the imports it judges', () => {
+  expect(importsOf('server/utils/plan/buildPlan.ts')).toContain('./planContext')
+  expect(ownPath('server/utils/plan/buildPlan.ts', '../reference')).toBe('server/utils/reference')
+})

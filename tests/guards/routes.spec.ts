@@ -1,0 +1,34 @@
+import { describe, expect, it } from 'vitest'
+import { checkSkips, filesUnder, textOf } from './files'
+
+const routes = filesUnder('server/api', ['.ts'])
+
+/** Every route is open to guests in this release; what each lets them see is said here, so that a new route must be. */
+const PUBLIC: Record<string, string> = {
+  'server/api/health.get.ts': 'says only that the server is up, and its edition',
+  'server/api/reference/species.get.ts': 'published figures, the same for everyone',
+  'server/api/reference/foods.get.ts': 'published figures, the same for everyone',
+  'server/api/reference/equations/index.get.ts': 'published figures, the same for everyone',
+  'server/api/reference/equations/[id]/value.get.ts': 'a sum over published figures, nothing kept',
+  'server/api/reference/sources.get.ts': 'the bibliography, the same for everyone',
+  'server/api/regimens/preview.post.ts': 'works out what was sent, nothing kept',
+  'server/api/regimens/sheet.pdf.post.ts': 'prints what was sent, nothing kept',
+  'server/api/regimens/mixing.pdf.post.ts': 'prints what was sent, nothing kept',
+  'server/api/regimens/label.pdf.post.ts': 'prints what was sent, nothing kept',
+  'server/api/regimens/index.post.ts': 'anyone may save a plan; only its key opens it',
+  'server/api/regimens/index.get.ts': 'lists only what this browser\'s sealed cookie remembers',
+}
+
+describe('every route', () => {
+  it('exists for each public entry, with a reason', () => expect(checkSkips(PUBLIC, routes)).toEqual([]))
+
+  it.each(routes)('%s is public for a reason, or asks for the plan\'s key', (path) => {
+    if (!(path in PUBLIC)) expect(textOf(path), 'call requireRegimen, or list it as public with a reason').toContain('requireRegimen(')
+  })
+  it.each(routes)('%s is described in the OpenAPI document', path => expect(textOf(path)).toContain('defineRouteMeta('))
+  it.each(routes.filter(path => /\.(post|put|patch)\.ts$/.test(path)))('%s reads its body through a schema', path => expect(textOf(path)).toContain('readBodyOf('))
+  it.each(routes)('%s does not read input around the schemas', (path) => {
+    expect(textOf(path)).not.toMatch(/\b(readBody|getQuery|getRouterParam|getRouterParams|readRawBody|readFormData)\(/)
+  })
+  it.each(routes)('%s stays short', path => expect(textOf(path).split('\n').length).toBeLessThan(90))
+})

@@ -1,0 +1,11 @@
+import { fileURLToPath } from 'node:url'
+import { defineConfig } from 'vitest/config'
+
+const alias = {
+  '#shared': fileURLToPath(new URL('./shared', import.meta.url)),
+  '#server': fileURLToPath(new URL('./server', import.meta.url)),
+}
+const plain = (name: string) => ({ resolve: { alias }, test: { name, environment: 'node' as const, include: [`tests/${name}/**/*.spec.ts`] } })
+
+/** Checks that need no framework: plain Node, seconds. Components and the built server have configs of their own. */
+export default defineConfig({ test: { projects: [plain('unit'), plain('reference'), plain('guards')] } })
