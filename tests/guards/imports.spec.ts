@@ -19,7 +19,9 @@ const RULES: { folder: string, may: string[], notPackages: RegExp, sentence: str
 ]
 
 function importsOf(path: string): string[] {
-  return [...textOf(path).matchAll(/(?:^|\n)\s*(?:import|export)\s[^'"\n]*?(?:from\s*)?['"]([^'"]+)['"]|import\(['"]([^'"]+)['"]\)/g)].map(match => (match[1] ?? match[2])!)
+  const patterns = [/\bfrom\s+['"]([^'"\n]+)['"]/g, /(?:^|\n)\s*import\s+['"]([^'"\n]+)['"]/g, /\bimport\(\s*['"]([^'"\n]+)['"]\s*\)/g]
+  const code = textOf(path).replace(/\/\*[\s\S]*?\*\//g, '')
+  return patterns.flatMap(pattern => [...code.matchAll(pattern)].map(match => match[1]!))
 }
 
 /** Own imports as a path from the root; null for a package. */
