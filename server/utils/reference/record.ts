@@ -49,7 +49,7 @@ const made = new WeakSet<object>()
  * @throws UncitedNumberError `cited.unknownReading` when `howRead` is none of `HOW_READ`;
  * @throws UncitedNumberError `cited.unknownSource` when the source is not in the bibliography.
  * @source house rule (no number without unit and source)
- * @example cited({ value: 20.1, unit: 'J/mL O2', sourceKey: 'house-rule', locator: 'usual default', howRead: 'restated' }).value // 20.1
+ * @example cited({ value: 20.1, unit: 'J/mL O2', sourceKey: 'trenchr', locator: 'default', howRead: 'restated' }).value // 20.1
  */
 export function cited(draft: { value: number } & Provenance): Cited {
   if (!Number.isFinite(draft.value)) throw new UncitedNumberError('cited.notANumber', `A cited value must be a finite number, not ${String(draft.value)} (${draft.sourceKey}, ${draft.locator}).`)

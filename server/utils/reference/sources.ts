@@ -20,7 +20,7 @@ const rows: Row[] = [
 
   // Mammals
   ['kleiber1961', 'book', 'Kleiber', 1961, 'The Fire of Life; also Physiological Reviews 27:511-541 (1947)', 'Table 7.3 and the 3/4-power law', 'restated in Hand et al. 2010, Table 5-2 (293 M^0.75 kJ)'],
-  ['hand2010', 'book', 'Hand, Thatcher, Remillard, Roudebush, Novotny (eds)', 2010, 'Small Animal Clinical Nutrition, 5th ed.', 'book', BOOK_PAGE, ['The dog of the weight-loss case is printed as 988 kcal/day at 34 kg; 70 M^0.75 gives 985.6.']],
+  ['sacn2010', 'book', 'Hand, Thatcher, Remillard, Roudebush, Novotny (eds)', 2010, 'Small Animal Clinical Nutrition, 5th ed.', 'book', BOOK_PAGE, ['The dog of the weight-loss case is printed as 988 kcal/day at 34 kg; 70 M^0.75 gives 985.6.']],
   ['wsava2018', 'guideline', 'World Small Animal Veterinary Association', 2018, 'World Congress proceedings 2018', 'pp. 290 (cat feeding example), 434 (fluid sums)', BOOK_PAGE],
   ['vnj2022', 'paper', 'Veterinary Nursing Journal', 2022, 'Table 2, energy factors after FEDIAF 2021', 'Veterinary Nursing Journal 37(4)', 'the table'],
   ['nrc2006', 'book', 'National Research Council', 2006, 'Nutrient Requirements of Dogs and Cats', 'book', '130 M^0.75 restated in a nursing journal; 95 M^0.75 from memory'],
@@ -35,7 +35,7 @@ const rows: Row[] = [
   ['cbicu', 'page', 'Clinician\'s Brief', null, 'Enteral and parenteral nutrition in the ICU; nutritional management nuances (abstract of Zoran 2003)', 'clinician magazine', 'the articles'],
   ['aaha2013', 'guideline', 'Davis et al.', 2013, 'AAHA/AAFP Fluid Therapy Guidelines for Dogs and Cats', 'Journal of the American Animal Hospital Association 49:149-159', 'toolkit pages and tables'],
   ['aaha2024', 'guideline', 'American Animal Hospital Association', 2024, 'AAHA Fluid Therapy Guidelines for Dogs and Cats', 'Journal of the American Animal Hospital Association 60, DOI 10.5326/JAAHA-MS-7444', 'abstract and summary pages; the tables were not seen'],
-  ['kruuse', 'page', 'Veterinary equipment supplier', null, 'Leaflet on infusion in rabbits and rodents', 'p. 7, citing Anaesthesia of Exotic Pets and Paul-Murphy 2007', 'the leaflet'],
+  ['infusionleaflet', 'page', 'Veterinary equipment supplier', null, 'Leaflet on infusion in rabbits and rodents', 'p. 7, citing Anaesthesia of Exotic Pets and Paul-Murphy 2007', 'the leaflet'],
 
   // Birds
   ['quesenberry1989', 'paper', 'Quesenberry, Mauldin & Hillyer', 1989, 'Nutritional support of the avian patient', 'Proceedings of the Association of Avian Veterinarians, pp. 11-19', 'reproduced on a page "Energy required for the avian patient"'],
@@ -61,7 +61,7 @@ const rows: Row[] = [
     'Several pages give no unit of weight at all. Kilograms.',
   ]],
   ['mader2006', 'book', 'Donoghue & Langenberg 1996; Donoghue 2006, in Mader (ed)', 2006, 'Reptile Medicine and Surgery', 'nutrition chapters', NOT_SEEN, ['32 M^0.77 is four to five times the measured resting rate at 30 deg C and above the whole-day field rate at every weight under 26 kg. Kept to be shown, never as a default.']],
-  ['eduturtle', 'page', 'Veterinary education articles', null, 'Nutritional support in reptiles; feeding the hospitalized turtle or tortoise; feeding the hospitalized snake', 'industry-hosted', INDUSTRY],
+  ['edur', 'page', 'Veterinary education articles', null, 'Nutritional support in reptiles; feeding the hospitalized turtle or tortoise; feeding the hospitalized snake', 'industry-hosted', INDUSTRY],
   ['wikivet', 'page', 'WikiVet', null, 'Snake supportive care', 'en.wikivet.net', 'the page'],
   ['educ', 'page', 'Veterinary education article', null, 'Fluid administration in amphibians', 'industry-hosted', INDUSTRY],
   ['wright2001', 'book', 'Wright & Whitaker (eds)', 2001, 'Amphibian Medicine and Captive Husbandry', 'tables of metabolic rate by temperature', NOT_SEEN],
@@ -69,8 +69,7 @@ const rows: Row[] = [
   ['vetstream', 'page', 'Vetstream', null, 'Assisted feeding (reptile)', 'ISSN 2398-2985', 'the page'],
   ['vin2007', 'guideline', 'World Small Animal Veterinary Association', 2007, 'Hospital care of reptiles for nurses', 'congress proceedings 2007', 'the text'],
   ['throckmorton1973', 'paper', 'Throckmorton', 1973, 'Digestive efficiency in the herbivorous lizard Ctenosaura pectinata', 'Copeia', ABSTRACT, ['The year is from memory.']],
-  ['carpenterreptile', 'book', 'Carpenter & Marion (eds)', 2018, 'Exotic Animal Formulary, 5th ed., wildlife chapter', 'p. 885', BOOK_PAGE],
-
+  
   // Field rates
   ['nagy2005', 'paper', 'Nagy; Nagy, Girard & Brown 1999', 2005, 'Field metabolic rate and body size', 'Journal of Experimental Biology 208:1621-1625; Annual Review of Nutrition 19:247-277', RESTATED_IN_CODE],
 
@@ -90,9 +89,48 @@ const rows: Row[] = [
   ['trenchr', 'page', 'Open biophysical-ecology packages', null, 'Documentation and unit tests of open ecology packages', 'package documentation', 'the documentation'],
   ['hainsworth1981', 'book', 'Hainsworth', 1981, 'Animal Physiology: Adaptations in Function', 'metabolic water', 'restated in an open ecology package'],
   ['finke2002', 'paper', 'Finke', 2002, 'Complete nutrient composition of commercially raised invertebrates', 'Zoo Biology 21:269-285', 'abstract; the table as printed in Hand-Rearing Birds; calcium and phosphorus from memory'],
-  ['usdasr27', 'dataset', 'United States Department of Agriculture', 2014, 'National Nutrient Database for Standard Reference, release 27, abbreviated file', 'public copy of ABBREV.csv', 'the rows named'],
+  ['usda-sr27', 'dataset', 'United States Department of Agriculture', 2014, 'National Nutrient Database for Standard Reference, release 27, abbreviated file', 'public copy of ABBREV.csv', 'the rows named'],
   ['atwater1900', 'paper', 'Atwater & Bryant', 1900, 'The availability and fuel value of food materials', 'general factors 4, 9, 4', NOT_SEEN],
   ['milks', 'page', 'Two documents on milk composition and kitten feeding', null, 'Energy of milks', 'kJ per litre; kitten formula after Lawler 2008', 'the documents'],
+
+  // Guidelines, papers and pages on feeding and refeeding
+  ['aaha2021', 'guideline', 'Cline et al.', 2021, 'AAHA Nutrition and Weight Management Guidelines', 'Journal of the American Animal Hospital Association 57:153-178', 'section on feeding plans for hospitalized patients'],
+  ['isfm2022', 'guideline', 'Taylor et al.', 2022, 'ISFM Consensus Guidelines on the inappetent hospitalised cat', 'Journal of Feline Medicine and Surgery 24:614-640', ABSTRACT],
+  ['wsava2011', 'guideline', 'Freeman et al.', 2011, 'WSAVA Nutritional Assessment Guidelines', 'Journal of Small Animal Practice 52:385-396', 'the citation only'],
+  ['wsava2017', 'guideline', 'Tully, in World Small Animal Veterinary Association', 2017, 'Avian fluid therapy', 'World Congress proceedings 2017, pp. 345-346', BOOK_PAGE],
+  ['cook2021', 'paper', 'Cook et al.', 2021, 'Refeeding syndrome in 11 cats', 'Journal of Feline Medicine and Surgery 23:883-891', ABSTRACT],
+  ['camacho2015', 'paper', 'Camacho et al.', 2015, 'Fluid therapy of 57 loggerhead turtles', 'PLoS ONE 10(7):e0132217', ABSTRACT],
+  ['dibartola2012', 'book', 'DiBartola (ed)', 2012, 'Fluid, Electrolyte and Acid-Base Disorders in Small Animal Practice', 'pp. 22, 333, 346, 347', BOOK_PAGE, ['The year of the scanned edition is from memory.']],
+  ['dvmhospital', 'page', 'Veterinary magazine', null, 'Nutritional support for hospitalized patients; feeding hospitalized patients for best clinical outcome', 'two articles', 'the articles'],
+  ['dvmreptile', 'page', 'Veterinary magazine', null, 'Fluid therapy for reptiles', 'conference proceedings', 'the text'],
+  ['ava', 'page', 'Cannon & Johnson', null, 'Handling and nursing reptiles', 'Australian Veterinary Association, Table 1', 'the table'],
+  ['merck', 'page', 'Merck/MSD Veterinary Manual', null, 'Care of orphaned native birds and mammals; body condition scores', 'merckvetmanual.com', 'the pages'],
+  ['aap', 'guideline', 'American Academy of Pediatrics; CDC', null, 'Preventing transmission of Salmonella from reptiles; washing hands', 'table and leaflet', 'the table and the leaflet'],
+  ['who2021', 'guideline', 'World Health Organization', 2021, 'Inpatient care of children with severe acute malnutrition: training course', 'module 4, Annexes A and C', 'rules and examples restated in an open human-health specification'],
+  ['nice2006', 'guideline', 'National Institute for Health and Care Excellence', 2006, 'Nutrition support for adults (CG32)', 'nice.org.uk', 'restated in two published tables'],
+  ['aspen2020', 'guideline', 'da Silva et al.', 2020, 'ASPEN consensus recommendations for refeeding syndrome', 'Nutrition in Clinical Practice 35:178-195', 'restated in two published tables'],
+  ['cornell2020', 'page', 'Cornell University', 2020, 'Study proposal: rapid or gradual refeeding of emaciated red-tailed hawks', 'vet.cornell.edu', 'the award page; results were not found'],
+  ['sheltermedicine', 'page', 'Shelter medicine teaching page', null, 'Feeding starved dogs and cats', 'sheltermedicine.com', 'the page'],
+  ['infantbats', 'page', 'Rehabilitation document', null, 'Rearing infant bats', 'document', 'the document'],
+  ['urbanwildlife', 'page', 'Rehabilitation handout', null, 'Emaciation protocol', 'urbanwildlifesociety.org', 'the handout, cut off in its third category'],
+  ['hadfield2006', 'paper', 'Hadfield, Clayton & Barnett', 2006, 'Nutritional support of amphibians', 'Journal of Exotic Pet Medicine', 'first page'],
+  ['edumammals', 'page', 'Veterinary education article', null, 'Fluid administration in exotic companion mammals', 'industry-hosted', INDUSTRY],
+  ['keeperpages', 'page', 'Keeper pages', null, 'Emaciation and energy of reptiles; the tortoise weight ratio', 'several', 'the pages; weak, used only where marked'],
+  ['clinicferret', 'page', 'Clinic page citing literature', null, 'Nutrition of ferrets', 'clinic page', 'the page; weak'],
+
+  // Energy: seen, but used as a cross-check or for its exponent only
+  ['bartges1999', 'paper', 'Bartges & Ritchie', 1999, 'Calculating the required volume of avian nutritional products', 'Compendium, August 1999', 'document excerpt'],
+  ['harper2000', 'paper', 'Harper', 2000, 'Estimating the energy needs of pet birds', 'Journal of Avian Medicine and Surgery 14:95-102', ABSTRACT],
+  ['chappell1987', 'paper', 'Chappell & Ellis', 1987, 'Resting metabolic rates in boid snakes', 'Journal of Comparative Physiology B 157:227-235', ABSTRACT],
+  ['becklowe1994', 'paper', 'Beck & Lowe', 1994, 'Resting metabolism of helodermatid lizards', 'Journal of Comparative Physiology B 164:124-129', ABSTRACT],
+  ['bennettnagy1977', 'paper', 'Bennett & Nagy', 1977, 'Energy expenditure in free-ranging lizards', 'Ecology, DOI 10.2307/1939022', ABSTRACT],
+  ['gienger2017', 'paper', 'Gienger et al.', 2017, 'Standard metabolic rate of crocodilians', 'PLoS ONE 12:e0171082', ABSTRACT],
+  ['white2006', 'paper', 'White, Phillips & Seymour', 2006, 'The scaling and temperature dependence of vertebrate metabolism', 'Biology Letters 2:125-127', ABSTRACT],
+  ['mcnab2005', 'paper', 'McNab', 2005, 'Uniformity in the basal metabolic rate of marsupials', 'Revista Chilena de Historia Natural 78:183-198', ABSTRACT],
+  ['nevarez', 'book', 'Nevarez (ed)', null, 'Five-Minute Veterinary Consult: Reptile and Amphibian', 'book', 'an excerpt'],
+  ['feldman2013', 'paper', 'Feldman & Meiri', 2013, 'Length-mass allometry in snakes', 'Biological Journal of the Linnean Society 108:161-172', ABSTRACT],
+  ['feldman2016', 'paper', 'Feldman, Sabath, Pyron, Mayrose & Meiri', 2016, 'Body sizes and diversification rates of lizards, snakes, amphisbaenians and the tuatara', 'Global Ecology and Biogeography 25:187-197', 'its clade equations as carried in a later data set'],
+  ['finke2015', 'paper', 'Finke', 2015, 'Complete nutrient content of four species of commercially available feeder insects', 'Zoo Biology 34:554-564', ABSTRACT],
 
   // Standards
   ['iso7886', 'standard', 'International Organization for Standardization', 2017, 'ISO 7886-1:2017, corrected version 2019-08: sterile hypodermic syringes for single use, part 1', 'clause 8', 'table of contents; tolerances restated in an estimate of syringe accuracy (Phillips 2016), the rest from memory'],
@@ -107,9 +145,9 @@ function sourceItem([key, kind, authors, year, title, where, seen, errata = []]:
  *
  * @returns map from key to source; keys are unique.
  * @source the sources themselves; `seen` says what of each was read
- * @example bibliography.get('andrews1985')!.errata[0] // 'The state term is 10^(0.14 S), …'
+ * @example sources.get('andrews1985')!.errata[0] // 'The state term is 10^(0.14 S), …'
  */
-export const bibliography: ReadonlyMap<string, SourceItem> = uniqueByKey(rows.map(sourceItem))
+export const sources: ReadonlyMap<string, SourceItem> = uniqueByKey(rows.map(sourceItem))
 
 function uniqueByKey(items: SourceItem[]): ReadonlyMap<string, SourceItem> {
   const map = new Map(items.map(item => [item.key, item]))
