@@ -15,6 +15,11 @@ export const MM_PER_INCH = 25.4
 export const KJ_PER_KCAL = 4.184
 /** One watt over a day, in kilojoules, exact. */
 export const KJ_PER_DAY_PER_WATT = 86.4
+/**
+ * Energy of one mL of oxygen used (STPD), J, at a respiratory quotient of about 0.8. Not a definition: the usual default of open
+ * biophysical code, restated there from Kleiber's fuel values (4.5 to 5 kcal per L).
+ */
+export const J_PER_ML_O2 = 20.1
 /** Millilitres in one US fluid ounce (231 cubic inches / 128), exact. */
 export const ML_PER_US_FL_OZ = 29.5735295625
 
