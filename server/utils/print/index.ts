@@ -1,0 +1,22 @@
+/** Everything that is printed. A plan goes in, a PDF comes out; nothing is calculated here. */
+import type { Plan } from '#shared/types/plan'
+import type { DocumentInfo } from './canvas'
+import { drawSheet } from './drawSheet'
+import type { PrintOptions } from './options'
+import { sheetModel } from './sheet'
+
+export { SheetRefusedError } from './options'
+export type { PrintContact, PrintOptions, PrintReference } from './options'
+
+/**
+ * The sheet for the enclosure: days of a plan with rows to write in, or a full-page DO NOT FEED.
+ * @throws SheetRefusedError when something a carer needs is missing.
+ */
+export async function sheetPdf(plan: Plan, options: PrintOptions): Promise<Buffer> {
+  const model = sheetModel(plan, options)
+  return drawSheet(model, options.paper, infoOf(model.title, 'Feeding sheet', options))
+}
+
+function infoOf(title: string, subject: string, options: PrintOptions): DocumentInfo {
+  return { title, subject, author: options.teamName?.trim() ?? '', appVersion: options.appVersion, madeAt: options.madeAt }
+}
