@@ -1,1 +1,92 @@
-export default defineNuxtConfig({ srcDir: '.', serverDir: 'server', telemetry: false, compatibilityDate: '2026-11-01' })
+import { cpSync, mkdirSync } from 'node:fs'
+import { resolve } from 'node:path'
+
+export default defineNuxtConfig({
+  modules: ['@nuxtjs/tailwindcss', '@pinia/nuxt', '@vueuse/nuxt', 'nuxt-auth-utils', 'nuxt-security', '@nuxt/eslint'],
+
+  // Said aloud: a stray app/ folder would otherwise move everything.
+  srcDir: '.',
+  serverDir: 'server',
+  compatibilityDate: '2026-11-01',
+  telemetry: false,
+  devtools: { enabled: false },
+
+  app: {
+    head: {
+      title: 'Thimbleful',
+      htmlAttrs: { lang: 'en' },
+      meta: [
+        { name: 'viewport', content: 'width=device-width, initial-scale=1' },
+        { name: 'description', content: 'Feeding plans for starved reptiles and other animals: from a weight to a sheet on the enclosure.' },
+      ],
+      link: [{ rel: 'icon', type: 'image/svg+xml', href: '/mark.svg' }],
+    },
+  },
+
+  // File names carry the feature already: components/plan/PlanBarrel.vue is <PlanBarrel>.
+  components: [{ path: '~/components', pathPrefix: false }],
+  tailwindcss: { cssPath: ['~/assets/css/main.css', { injectPosition: 'first' }], viewer: false },
+
+  runtimeConfig: {
+    // Where database, uploads and secret live; NUXT_DATA_DIR moves it.
+    dataDir: '.data',
+    // Multiplies the limits of requests per address; raised in tests and benchmarks.
+    rateLimitFactor: 1,
+    // The password is made on first start (server/plugins/00.secret.ts); secure cookies only where HTTPS is.
+    session: { name: 'thimbleful', password: '', maxAge: 60 * 60 * 24 * 30, cookie: { sameSite: 'lax', httpOnly: true, secure: false } },
+    public: { appVersion: '0.1.0' },
+  },
+
+  security: {
+    // Plain http on a laptop or in a barn is the usual case: nothing may force https.
+    headers: {
+      strictTransportSecurity: false,
+      referrerPolicy: 'no-referrer',
+      crossOriginEmbedderPolicy: false,
+      contentSecurityPolicy: {
+        'default-src': ['\'self\''],
+        'base-uri': ['\'none\''],
+        'connect-src': ['\'self\''],
+        'font-src': ['\'self\''],
+        'form-action': ['\'self\''],
+        'frame-ancestors': ['\'self\''],
+        'frame-src': ['\'self\'', 'blob:'],
+        'img-src': ['\'self\'', 'data:', 'blob:'],
+        'object-src': ['\'self\'', 'blob:'],
+        'script-src': ['\'self\'', '\'nonce-{{nonce}}\'', '\'strict-dynamic\''],
+        'script-src-attr': ['\'none\''],
+        'style-src': ['\'self\'', '\'unsafe-inline\''],
+        'upgrade-insecure-requests': false,
+      },
+    },
+    // Ours know the error shape and count per route (server/utils/http).
+    rateLimiter: false,
+    requestSizeLimiter: false,
+    xssValidator: false,
+    corsHandler: false,
+  },
+
+  nitro: {
+    compressPublicAssets: true,
+    errorHandler: '~~/server/error.ts',
+    experimental: { openAPI: true },
+    openAPI: { production: 'runtime', route: '/_openapi.json', meta: { title: 'Thimbleful', description: 'Feeding plans for starved animals. Every number carries its unit in its name.', version: '0.1.0' }, ui: { scalar: false, swagger: false } },
+  },
+
+  hooks: {
+    // Migrations and print fonts are read from disk: beside the built server, and in the sources while developing.
+    'nitro:init'(nitro) {
+      nitro.hooks.hook('compiled', () => {
+        if (nitro.options.dev) return
+        const { rootDir, output } = nitro.options
+        cpSync(resolve(rootDir, 'server/db/migrations'), resolve(output.serverDir, 'migrations'), { recursive: true })
+        mkdirSync(resolve(output.serverDir, 'fonts'), { recursive: true })
+        for (const weight of ['Regular', 'Bold']) {
+          cpSync(resolve(rootDir, `node_modules/source-sans/TTF/SourceSans3-${weight}.ttf`), resolve(output.serverDir, 'fonts', `SourceSans3-${weight}.ttf`))
+        }
+      })
+    },
+  },
+
+  typescript: { strict: true, typeCheck: false },
+})

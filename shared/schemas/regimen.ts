@@ -147,3 +147,15 @@ export const SheetQuery = z.object({
   days: z.string().regex(/^\d{1,3}(-\d{1,3})?$/, 'Give the days as 1-3 or 2.').default('1-3'),
 })
 export type SheetQuery = z.infer<typeof SheetQuery>
+
+/** A change of a saved plan: the whole input again, and the version it is based on. */
+export const RegimenChange = RegimenInput.extend({
+  baseVersion: z.number({ error: 'The version this change is based on must be a whole number.' }).int('The version this change is based on must be a whole number.').min(1, 'Versions begin at 1.').optional(),
+})
+
+export const RegimenParams = z.object({ id: z.string().min(1).max(64) })
+
+export const RegimenQuery = z.object({
+  key: z.string().max(200).optional(),
+  version: z.coerce.number({ error: 'The version must be a whole number.' }).int('The version must be a whole number.').min(1, 'Versions begin at 1.').optional(),
+})

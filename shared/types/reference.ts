@@ -147,6 +147,16 @@ export interface EquationVariable {
   high: number
 }
 
+export interface EquationConstant {
+  value: number
+  unit: string
+  meaning: string
+  sourceKey?: string
+  locator?: string
+  howRead?: HowRead
+  note?: string
+}
+
 export interface EquationItem {
   id: string
   topic: EquationTopic
@@ -156,7 +166,7 @@ export interface EquationItem {
   expression: string
   variables: EquationVariable[]
   /** Constants of the expression that carry their own source, by name. */
-  constants: Record<string, { value: number, unit: string, meaning: string }>
+  constants: Record<string, EquationConstant>
   taxon: string
   groups: Group[]
   /** Only these species, where an equation holds for no other. */
@@ -176,6 +186,8 @@ export interface EquationStep {
   expression: string
   value: number
   unit: string
+  /** Where the factor of this step comes from, for conversions. */
+  sourceKey?: string
 }
 
 export interface EquationValue {

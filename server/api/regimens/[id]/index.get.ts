@@ -1,0 +1,17 @@
+import { RegimenParams, RegimenQuery } from '#shared/schemas/regimen'
+import type { SavedRegimen } from '#shared/types/plan'
+import { rememberGuestPlan } from '#server/utils/access/guestPlans'
+import { requireRegimen } from '#server/utils/access/requireRegimen'
+import { readParamsOf, readQueryOf } from '#server/utils/http/readInput'
+import { versionOf } from '#server/utils/regimen/versionOf'
+
+defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'A saved plan, as it was saved', parameters: [{ in: 'path', name: 'id', required: true }, { in: 'query', name: 'key' }, { in: 'query', name: 'version' }], responses: { 200: { description: 'SavedRegimen' }, 404: { description: 'No such plan, wrong key, or the link has ended' } } } })
+
+export default defineEventHandler(async (event): Promise<SavedRegimen> => {
+  const { id } = readParamsOf(event, RegimenParams)
+  const { key, version } = readQueryOf(event, RegimenQuery)
+  const row = await requireRegimen(event, id, key)
+  if (key) await rememberGuestPlan(event, { id, key })
+  setResponseHeader(event, 'cache-control', 'private, no-store')
+  return versionOf(row, version)
+})

@@ -1,0 +1,19 @@
+import type { H3Event } from 'h3'
+import type { RegimenRow } from '#shared/types/rows'
+import { database, findRegimen } from '../data'
+import { fail } from '../http/fail'
+import { guestPlansOf } from './guestPlans'
+import { keyFits } from './linkKey'
+
+/**
+ * The plan that a request may see: by the key of its private link, or because this browser's cookie remembers it.
+ * Wrong key, ended link and no such plan are the same answer, so that nothing can be found out by trying.
+ * @returns the row that was checked, so that a handler cannot skip the check.
+ */
+export async function requireRegimen(event: H3Event, id: string, key: string | undefined): Promise<RegimenRow> {
+  const row = findRegimen(database(), id)
+  const usedKey = key ?? (await guestPlansOf(event)).find(one => one.id === id)?.key
+  const open = row !== undefined && usedKey !== undefined && keyFits(usedKey, row.keyHash) && row.linkExpiresAt > new Date().toISOString()
+  if (!open) throw fail({ status: 404, code: 'regimen.notFound', message: 'There is no plan behind this link, or the link has ended. Links are good for 30 days; ask who sent it for a new one.' })
+  return row
+}
