@@ -7,6 +7,8 @@ export interface CompiledExpression {
   symbols: readonly string[]
   /** Its value. @param scope every symbol by name. */
   valueOf: (scope: Record<string, number>) => number
+  /** The expression as it is read aloud, with names: `70 × M^0.75`. */
+  written: string
   /** The expression with the values written in. @param write how a number is written. */
   filledIn: (scope: Record<string, number>, write: (value: number) => string) => string
 }
@@ -42,7 +44,8 @@ export function compileExpression(expression: string): CompiledExpression {
   const made: CompiledExpression = {
     symbols: Object.freeze([...new Set(symbols)]),
     valueOf,
-    filledIn: (scope, write) => fill(node, scope, write),
+    written: fill(node, name => name),
+    filledIn: (scope, write) => fill(node, name => write(scope[name]!)),
   }
   compiled.set(expression, made)
   return made
@@ -71,6 +74,8 @@ function closureOf(node: MathNode, symbols: string[], expression: string): (scop
       return scope => run(inner(scope))
     }
     if (isKind(one, 'OperatorNode')) {
+      // "2 M" reads like a product to some and like a slip to others; the sign has to be written.
+      if (one.implicit) return refuse('a product without its sign')
       const [left, right] = one.args.map(walk)
       if (one.args.length === 1 && one.op === '-') return scope => -left!(scope)
       if (one.args.length !== 2 || !OPERATORS.has(one.op)) return refuse(`the operator ${one.op}`)
@@ -87,13 +92,14 @@ function closureOf(node: MathNode, symbols: string[], expression: string): (scop
   return walk(node)
 }
 
-function fill(node: MathNode, scope: Record<string, number>, write: (value: number) => string): string {
-  if (isKind(node, 'ParenthesisNode')) return `(${fill(node.content, scope, write)})`
-  if (isKind(node, 'ConstantNode')) return write(Number(node.value))
-  if (isKind(node, 'SymbolNode')) return write(scope[node.name]!)
-  if (isKind(node, 'FunctionNode')) return `${node.fn.name}(${fill(node.args[0]!, scope, write)})`
+/** Numbers of the expression itself stay as published; names are written by `writeName`. */
+function fill(node: MathNode, writeName: (name: string) => string): string {
+  if (isKind(node, 'ParenthesisNode')) return `(${fill(node.content, writeName)})`
+  if (isKind(node, 'ConstantNode')) return String(node.value)
+  if (isKind(node, 'SymbolNode')) return writeName(node.name)
+  if (isKind(node, 'FunctionNode')) return `${node.fn.name}(${fill(node.args[0]!, writeName)})`
   if (isKind(node, 'OperatorNode')) {
-    const parts = node.args.map(one => fill(one, scope, write))
+    const parts = node.args.map(one => fill(one, writeName))
     if (parts.length === 1) return `−${parts[0]}`
     const sign = { '*': '×', '/': '÷', '-': '−' }[node.op] ?? node.op
     return node.op === '^' ? `${parts[0]}^${parts[1]}` : `${parts[0]} ${sign} ${parts[1]}`
@@ -106,7 +112,7 @@ interface Kinds {
   ConstantNode: { value: unknown }
   SymbolNode: { name: string }
   FunctionNode: { fn: { name: string }, args: MathNode[] }
-  OperatorNode: { op: string, args: MathNode[] }
+  OperatorNode: { op: string, args: MathNode[], implicit: boolean }
 }
 
 function isKind<Kind extends keyof Kinds>(node: MathNode, kind: Kind): node is MathNode & Kinds[Kind] {

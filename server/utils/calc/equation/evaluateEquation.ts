@@ -5,24 +5,25 @@ import { CalcInputError } from '../calcInputError'
 import { compileExpression } from './compileExpression'
 
 /** One way from a published unit to kcal/day: factor, and how the step is written. */
-interface Conversion { label: string, factor: number, shown: string, unit: string }
+interface Conversion { label: string, factor: number, shown: string, unit: string, sourceKey: string }
 
 const TO_KCAL: Record<string, Conversion[]> = {
   'kcal/day': [],
-  'kJ/day': [{ label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day' }],
+  'kJ/day': [{ label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day', sourceKey: 'definition' }],
   'W': [
-    { label: 'Watts to kilojoules a day', factor: KJ_PER_DAY_PER_WATT, shown: '× 86.4', unit: 'kJ/day' },
-    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day' },
+    { label: 'Watts to kilojoules a day', factor: KJ_PER_DAY_PER_WATT, shown: '× 86.4', unit: 'kJ/day', sourceKey: 'definition' },
+    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day', sourceKey: 'definition' },
   ],
   'mL O2/h': [
-    { label: 'Oxygen a day', factor: 24, shown: '× 24', unit: 'mL O2/day' },
-    { label: 'Energy at 20.1 J per mL of oxygen', factor: J_PER_ML_O2 / 1000, shown: '× 20.1 ÷ 1,000', unit: 'kJ/day' },
-    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day' },
+    { label: 'Oxygen a day', factor: 24, shown: '× 24', unit: 'mL O2/day', sourceKey: 'definition' },
+    { label: 'Energy at 20.1 J per mL of oxygen', factor: J_PER_ML_O2 / 1000, shown: '× 20.1 ÷ 1,000', unit: 'kJ/day', sourceKey: 'trenchr' },
+    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day', sourceKey: 'definition' },
   ],
   'mL O2/min': [
-    { label: 'Oxygen a day', factor: 1440, shown: '× 1,440', unit: 'mL O2/day' },
-    { label: 'Energy at 20.1 J per mL of oxygen', factor: J_PER_ML_O2 / 1000, shown: '× 20.1 ÷ 1,000', unit: 'kJ/day' },
-    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day' },
+    { label: 'Oxygen an hour', factor: 60, shown: '× 60', unit: 'mL O2/h', sourceKey: 'definition' },
+    { label: 'Oxygen a day', factor: 24, shown: '× 24', unit: 'mL O2/day', sourceKey: 'definition' },
+    { label: 'Energy at 20.1 J per mL of oxygen', factor: J_PER_ML_O2 / 1000, shown: '× 20.1 ÷ 1,000', unit: 'kJ/day', sourceKey: 'trenchr' },
+    { label: 'Kilojoules to kilocalories', factor: 1 / KJ_PER_KCAL, shown: '÷ 4.184', unit: 'kcal/day', sourceKey: 'definition' },
   ],
 }
 
@@ -59,7 +60,9 @@ export function equationKcalPerDay(record: EquationItem, variables: Record<strin
 }
 
 /**
- * An equation worked out in full: value in the published unit, each step, and kcal/day for energy.
+ * An equation worked out in full: value in the published unit, the working, and kcal/day for energy.
+ *
+ * Hint: the first step shows the expression with names and then with values; each unit on the way is a step of its own.
  *
  * @param record  the equation.
  * @param variables  every variable of the record, by name, in its unit.
@@ -73,20 +76,18 @@ export function equationKcalPerDay(record: EquationItem, variables: Record<strin
 export function evaluateEquation(record: EquationItem, variables: Record<string, number>, options: { refuseOutOfRange?: boolean } = {}): EquationValue {
   if (options.refuseOutOfRange) refuseOutOfRange(record, variables)
   const value = equationNumber(record, variables)
-  const steps: EquationStep[] = [{
-    label: record.title,
-    expression: compileExpression(record.expression).filledIn(scopeOf(record, variables), one => formatSignificant(one, 4)),
-    value,
-    unit: record.resultUnit,
-  }]
-  if (record.topic !== 'energy') return { value, unit: record.resultUnit, steps, sourceKey: record.provenance.sourceKey }
+  const compiled = compileExpression(record.expression)
+  const filledIn = compiled.filledIn(scopeOf(record, variables), one => formatSignificant(one, 4))
+  const sourceKey = record.provenance.sourceKey
+  const steps: EquationStep[] = [{ label: record.title, expression: `${compiled.written} = ${filledIn}`, value, unit: record.resultUnit, sourceKey }]
+  if (record.topic !== 'energy') return { value, unit: record.resultUnit, steps, sourceKey }
   let running = value
   for (const step of conversionsOf(record)) {
     const expression = `${formatSignificant(running, 4)} ${step.shown}`
     running *= step.factor
-    steps.push({ label: step.label, expression, value: running, unit: step.unit })
+    steps.push({ label: step.label, expression, value: running, unit: step.unit, sourceKey: step.sourceKey })
   }
-  return { value, unit: record.resultUnit, kcalPerDay: running, steps, sourceKey: record.provenance.sourceKey }
+  return { value, unit: record.resultUnit, kcalPerDay: running, steps, sourceKey }
 }
 
 function conversionsOf(record: EquationItem): Conversion[] {

@@ -1,0 +1,48 @@
+import type { EquationItem, FoodItem, SourceItem, SpeciesItem } from '#shared/types/reference'
+import type { Rules } from './rules'
+import { equations } from './editions/2026-12/equations.data'
+import { rules } from './editions/2026-12/rules.data'
+import { sources } from './sources'
+
+/** One frozen set of everything a plan is worked out from. A saved plan names its edition, and old editions stay. */
+export interface Edition {
+  id: string
+  equations: ReadonlyMap<string, EquationItem>
+  species: ReadonlyMap<string, SpeciesItem>
+  foods: ReadonlyMap<string, FoodItem>
+  sources: ReadonlyMap<string, SourceItem>
+  rules: Rules
+}
+
+const species: ReadonlyMap<string, SpeciesItem> = new Map()
+const foods: ReadonlyMap<string, FoodItem> = new Map()
+
+/** Newest last. */
+const EDITIONS: ReadonlyMap<string, Edition> = new Map([
+  ['2026-12', Object.freeze({ id: '2026-12', equations, species, foods, sources, rules })],
+])
+
+/**
+ * The edition that new plans are worked out from.
+ *
+ * @returns the newest edition; the same object every time.
+ * @throws Never.
+ * @source house rule (a plan is worked out from one edition only)
+ * @example currentEdition().id // '2026-12'
+ */
+export function currentEdition(): Edition {
+  return [...EDITIONS.values()].at(-1)!
+}
+
+/**
+ * An edition by its id, for plans that were saved under it.
+ *
+ * @param id  for example `2026-12`.
+ * @returns the edition, or null when this version of the product does not carry it.
+ * @throws Never.
+ * @source house rule (a saved plan keeps its edition)
+ * @example editionById('2026-12')?.id // '2026-12'
+ */
+export function editionById(id: string): Edition | null {
+  return EDITIONS.get(id) ?? null
+}
