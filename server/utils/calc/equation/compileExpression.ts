@@ -1,4 +1,4 @@
-import { create, parseDependencies, type MathNode } from 'mathjs'
+import { create, parseDependencies, type MathNode } from 'mathjs/number'
 import { CalcInputError } from '../calcInputError'
 
 /** A parsed expression: what it needs, and its value for given numbers. */
@@ -13,7 +13,7 @@ export interface CompiledExpression {
   filledIn: (scope: Record<string, number>, write: (value: number) => string) => string
 }
 
-const { parse } = create({ parseDependencies })
+const { parse } = create({ parseDependencies: parseDependencies! })
 const FUNCTIONS: Record<string, (value: number) => number> = { exp: Math.exp, log10: Math.log10, sqrt: Math.sqrt }
 const OPERATORS = new Set(['+', '-', '*', '/', '^'])
 // Parsing takes longer than a whole plan; the records of an edition never change.

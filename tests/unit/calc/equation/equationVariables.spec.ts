@@ -1,18 +1,49 @@
-import { expect, it } from 'vitest'
+import { describe, expect, it } from 'vitest'
+import type { EquationItem, EquationVariable } from '#shared/types/reference'
 import { equationVariables } from '#server/utils/calc/equation/equationVariables'
-import { equationRecord } from './records'
 
-it('fills the canonical names in the units the record asks for', () => {
-  const record = equationRecord('M + g + T + S + L', [['M', 'kg', 0, 99], ['g', 'g', 0, 99999], ['T', 'deg C', 15, 40], ['S', '', 0, 1], ['L', 'm', 0, 9]])
-  expect(equationVariables(record, { massG: 1360, temperatureC: 30, lengthMm: 40 })).toEqual({ M: 1.36, g: 1360, T: 30, S: 1, L: 0.04 })
-})
-it('keeps the temperature inside the range, and falls back to where the equation holds', () => {
-  const record = equationRecord('T', [['T', 'deg C', 15, 40]], { holdsAtC: 25.5 })
-  expect(equationVariables(record, { temperatureC: 50 })).toEqual({ T: 40 })
-  expect(equationVariables(record, { temperatureC: null })).toEqual({ T: 25.5 })
-})
-it('takes grams where the record says grams, extras by name, and leaves the unknown as NaN', () => {
-  const record = equationRecord('M * b', [['M', 'g', 0, 99999], ['b', '', 0, 9]])
-  expect(equationVariables(record, { massG: 50, b: 3 })).toEqual({ M: 50, b: 3 })
-  expect(equationVariables(record, { massG: 50 }).b).toBeNaN()
+function record(variables: [name: string, unit: string, low?: number, high?: number][], holdsAtC: number | null = null): EquationItem {
+  return {
+    id: 'made-up', topic: 'energy', title: 'Made up', expression: '1', constants: {}, taxon: 'none', groups: [], speciesIds: null, basis: 'resting',
+    holdsAtC, temperatureTerm: 'none', resultUnit: 'kcal/day', notes: [], provenance: { sourceKey: 'definition', locator: 'test', howRead: 'original', unit: 'kcal/day' },
+    variables: variables.map(([name, unit, low = 0, high = 1e6]): EquationVariable => ({ name, unit, low, high, meaning: name })),
+  }
+}
+
+describe('equationVariables', () => {
+  it('gives weight in kg or g as the record says', () => {
+    expect(equationVariables(record([['M', 'kg']]), { massG: 1360 })).toEqual({ M: 1.36 })
+    expect(equationVariables(record([['M', 'g']]), { massG: 1360 })).toEqual({ M: 1360 })
+    expect(equationVariables(record([['g', 'g']]), { massG: 10 })).toEqual({ g: 10 })
+  })
+
+  it('gives length in the record\'s own unit', () => {
+    for (const [unit, expected] of [['m', 0.125], ['cm', 12.5], ['mm', 125]] as const) {
+      expect(equationVariables(record([['L', unit]]), { lengthMm: 125 }).L).toBeCloseTo(expected, 12)
+    }
+  })
+
+  it('keeps the temperature inside the record\'s range', () => {
+    const withT = record([['T', 'deg C', 15, 40]])
+    expect(equationVariables(withT, { temperatureC: 30 })).toEqual({ T: 30 })
+    expect(equationVariables(withT, { temperatureC: 5 })).toEqual({ T: 15 })
+    expect(equationVariables(withT, { temperatureC: 45 })).toEqual({ T: 40 })
+  })
+
+  it('takes the temperature the equation holds at when none is given', () => {
+    const tortoise = record([['T', 'deg C', 15, 40]], 25.5)
+    expect(equationVariables(tortoise, {})).toEqual({ T: 25.5 })
+    expect(equationVariables(tortoise, { temperatureC: null })).toEqual({ T: 25.5 })
+    expect(equationVariables(record([['T', 'deg C', 15, 40]]), { temperatureC: null }).T).toBeNaN()
+  })
+
+  it('takes the resting state when none is given, and passes other names through', () => {
+    expect(equationVariables(record([['S', '0 or 1']]), {})).toEqual({ S: 1 })
+    expect(equationVariables(record([['S', '0 or 1']]), { state: 0 })).toEqual({ S: 0 })
+    expect(equationVariables(record([['L0', 'mm'], ['b', 'exponent']]), { L0: 110, b: 3, unused: 9 })).toEqual({ L0: 110, b: 3 })
+  })
+
+  it('leaves what is not known as not a number, for the equation to refuse', () => {
+    expect(equationVariables(record([['M', 'kg'], ['L', 'mm'], ['b', 'exponent']]), {})).toEqual({ M: Number.NaN, L: Number.NaN, b: Number.NaN })
+  })
 })
