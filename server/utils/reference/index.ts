@@ -2,6 +2,7 @@ import type { EquationItem, FoodItem, SourceItem, SpeciesItem } from '#shared/ty
 import type { Rules } from './rules'
 import { equations } from './editions/2026-12/equations.data'
 import { rules } from './editions/2026-12/rules.data'
+import { species } from './editions/2026-12/species'
 import { sources } from './sources'
 
 /** One frozen set of everything a plan is worked out from. A saved plan names its edition, and old editions stay. */
@@ -14,12 +15,18 @@ export interface Edition {
   rules: Rules
 }
 
-const species: ReadonlyMap<string, SpeciesItem> = new Map()
-const foods: ReadonlyMap<string, FoodItem> = new Map()
+const foods: readonly FoodItem[] = []
+
+/** By id, in the order of the list. Two of one name would hide each other. */
+function itemsById<Item extends { id: string }>(items: readonly Item[]): ReadonlyMap<string, Item> {
+  const map = new Map(items.map(item => [item.id, item]))
+  if (map.size !== items.length) throw new Error('Two items of the reference data have the same id.')
+  return map
+}
 
 /** Newest last. */
 const EDITIONS: ReadonlyMap<string, Edition> = new Map([
-  ['2026-12', Object.freeze({ id: '2026-12', equations, species, foods, sources, rules })],
+  ['2026-12', Object.freeze({ id: '2026-12', equations, species: itemsById(species), foods: itemsById(foods), sources, rules })],
 ])
 
 /**

@@ -9,7 +9,6 @@
  * - `residual-index`: needs the whole sample, not one animal.
  * - 32 M^0.76 for snakes: seen once, between 32 M^0.75 and 32 M^0.77, which are here.
  * - ferrets, 70 and 200 to 300 kcal/kg: one clinic page, weak, and not linear in weight.
- * - otters, 84.6 M^0.78: no otter among the species.
  * - fluid rates in mL/kg/day: not equations; they stand with the species and in the rules.
  */
 import type { EquationItem } from '#shared/types/reference'

@@ -30,9 +30,10 @@ export const endothermEnergyEquations = [
   endotherm({
     id: 'bat-whole-day', title: 'A whole active day of a small insect-eating bat', expression: 'k * 70 * M ^ 0.75', variables: [kilograms(0.003, 0.1)],
     constants: { k: { cited: cited({ value: 2, unit: 'times resting', sourceKey: 'hill1984', locator: '9 g bat, active night plus warm rest by day: about 0.5 kcal/g/day, 2.3 times 70 M^0.75', howRead: 'computed', note: 'Rounded down.' }), meaning: 'a day of flight and warm rest over resting' } },
-    taxon: 'small insect-eating bats', groups: ['mammal-placental'], speciesIds: ['sp-pipistrelle'], basis: 'field', resultUnit: 'kcal/day',
+    taxon: 'small insect-eating bats', groups: ['mammal-placental'], speciesIds: ['sp-pipistrelle', 'sp-noctule', 'sp-big-brown-bat'], basis: 'field', resultUnit: 'kcal/day',
     provenance: { sourceKey: 'hill1984', locator: 'whole-day budget of a 9 g bat', howRead: 'computed' }, notes: ['Less when it goes cold by day.'],
   }),
+  endotherm({ id: 'otter-84-078', title: 'Resting energy of otters', expression: '84.6 * M ^ 0.78', variables: [kilograms(0.05, 45)], taxon: 'otters', groups: ['mammal-placental'], speciesIds: ['sp-eurasian-otter'], basis: 'resting', resultUnit: 'kcal/day', provenance: { sourceKey: 'azaotter', locator: 'p. 67, Table 12', howRead: 'original' }, notes: ['Three times this for a cub that grows: 53 kcal a day at 135 g.'] }),
   // Free-living days, nutrition sheet 1.7.
   endotherm({ id: 'nagy-1999-mammal', title: 'A whole free-living day of a mammal', expression: '4.82 * g ^ 0.734', variables: [grams(0.5, 2000000)], taxon: 'mammals, 79 species', groups: MAMMALS, basis: 'field', resultUnit: 'kJ/day', provenance: { sourceKey: 'nagy2005', locator: 'field metabolic rate, mammals', howRead: 'restated' } }),
   endotherm({ id: 'nagy-1999-eutherian', title: 'A whole free-living day of a placental mammal', expression: '4.21 * g ^ 0.772', variables: [grams(0.5, 2000000)], taxon: 'placental mammals', groups: ['mammal-placental'], basis: 'field', resultUnit: 'kJ/day', provenance: { sourceKey: 'nagy2005', locator: 'placental mammals; exponent in the abstract of 1999', howRead: 'memory' } }),
