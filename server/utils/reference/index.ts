@@ -1,6 +1,7 @@
 import type { EquationItem, FoodItem, SourceItem, SpeciesItem } from '#shared/types/reference'
 import type { Rules } from './rules'
 import { equations } from './editions/2026-12/equations.data'
+import { foods } from './editions/2026-12/foods.data'
 import { rules } from './editions/2026-12/rules.data'
 import { species } from './editions/2026-12/species'
 import { sources } from './sources'
@@ -14,8 +15,6 @@ export interface Edition {
   sources: ReadonlyMap<string, SourceItem>
   rules: Rules
 }
-
-const foods: readonly FoodItem[] = []
 
 /** By id, in the order of the list. Two of one name would hide each other. */
 function itemsById<Item extends { id: string }>(items: readonly Item[]): ReadonlyMap<string, Item> {
