@@ -136,7 +136,7 @@ function slurry(id: string, name: string, recipe: { powderG: number, waterMl: nu
 }
 
 const slurries: FoodRow[] = [
-  slurry('demo-insectivore-slurry', 'Insect-eater recovery powder (demonstration)', { powderG: 30, waterMl: 91, madeUpMl: 110, energyKcalPerPowderG: 4.4 }, [11.4, 6.9, 3], ['insectivore', 'carnivore']),
+  slurry('demo-insectivore-slurry', 'Insect-eater recovery powder (demonstration)', { powderG: 20, waterMl: 87, madeUpMl: 100, energyKcalPerPowderG: 4.5 }, [8.6, 5.4, 2.2], ['insectivore', 'carnivore']),
   slurry('demo-omnivore-slurry', 'All-eater recovery powder (demonstration)', { powderG: 30, waterMl: 80, madeUpMl: 100, energyKcalPerPowderG: 4 }, [8.2, 4.1, 13.1], ['omnivore', 'granivore', 'frugivore']),
   slurry('demo-herbivore-slurry', 'Plant-eater recovery powder (demonstration)', { powderG: 25, waterMl: 84, madeUpMl: 100, energyKcalPerPowderG: 3.2 }, [4.6, 1.1, 13.5], ['herbivore']),
 ]
