@@ -107,11 +107,12 @@ function numberedEvery(canvas: Canvas, capacityMl: number, stepMl: number, stepW
 
 const CHECK_LINE_MM = 50
 
-/** A line to hold a ruler to: printers shrink pages without asking. */
-export function drawCheckLine(canvas: Canvas, x: number, y: number): number {
-  const wide = millimetres(CHECK_LINE_MM)
-  canvas.rule(x, y + 4, x + wide, y + 4, 0.8)
-  canvas.rule(x, y, x, y + 8, 0.8)
-  canvas.rule(x + wide, y, x + wide, y + 8, 0.8)
-  return wide
+/** A line to hold a ruler to: printers shrink pages without asking. Its end marks stand 50 mm apart, inside `right`. */
+export function drawCheckLine(canvas: Canvas, right: number, y: number): void {
+  const thickness = 0.8
+  const to = right - thickness / 2
+  const from = to - millimetres(CHECK_LINE_MM)
+  canvas.rule(from, y + 4, to, y + 4, thickness)
+  canvas.rule(from, y, from, y + 8, thickness)
+  canvas.rule(to, y, to, y + 8, thickness)
 }

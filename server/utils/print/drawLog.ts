@@ -1,14 +1,14 @@
 /** The table a carer writes in: a head, a row to weigh in on for each day, a row for each feed, a spare row. */
 import { BOX_WIDTH, linesHeight, middleBaseline, millimetres, type Canvas } from './canvas'
-import { BODY, drawTick, drawWriteIn, gapBlock, LARGE, WRITE_ROW, type Block } from './pageParts'
+import { BODY_SIZE, drawTick, drawWriteIn, gapBlock, LARGE_SIZE, WRITE_ROW, type Block } from './pageParts'
 import type { LogDay, LogRow, Stretch } from './sheet'
 import { strong } from './richText'
 import { breakLines, textWidth } from './shaping'
+import { CELL_PAD, drawRowSides, headRowBlock } from './tableParts'
 
 const FEED_COLUMNS = [27, 30, 31, 25, 23, 25, 19].map(millimetres)
-const FLUID_COLUMNS = [27, 34, 47, 24, 25, 23].map(millimetres)
+const FLUID_COLUMNS = [22, 37, 44, 28, 27, 22].map(millimetres)
 const DAY_ROW = millimetres(13)
-const PAD = 5
 
 function columnsOf(stretch: Stretch): number[] {
   return stretch.amounts.length > 0 ? FEED_COLUMNS : FLUID_COLUMNS
@@ -19,63 +19,39 @@ function isTick(stretch: Stretch, column: number): boolean {
 }
 
 export function logHeadBlock(stretch: Stretch): Block {
-  const columns = columnsOf(stretch)
-  const heads = stretch.heads.map((head, index) => breakLines([strong(head)], columns[index]! - PAD * 2 + 3, BODY))
-  const height = Math.max(...heads.map(lines => linesHeight(lines, BODY))) + 5
-  return {
-    height,
-    draw: (canvas, top) => {
-      canvas.rule(0, top, BOX_WIDTH, top, 1.6)
-      let x = 0
-      heads.forEach((lines, index) => {
-        canvas.lines(x + PAD, top + height - 2 - linesHeight(lines, BODY), lines, BODY)
-        x += columns[index]!
-      })
-      drawSides(canvas, columns, top, height)
-    },
-  }
-}
-
-/** Upright rules of one row, and its lower edge. */
-function drawSides(canvas: Canvas, columns: readonly number[], top: number, height: number, lower = 0.8) {
-  let x = 0
-  for (const width of [0, ...columns]) {
-    x += width
-    canvas.rule(x, top, x, top + height, 0.8)
-  }
-  canvas.rule(0, top + height, BOX_WIDTH, top + height, lower)
+  return headRowBlock(stretch.heads, columnsOf(stretch))
 }
 
 /** The first row of a day: which day, weight before the first feed, water. */
 export function dayRowBlock(day: LogDay, continued: boolean): Block {
   const columns = [millimetres(33), millimetres(59), millimetres(88)]
-  const weigh = breakLines(day.weigh, columns[1]! - millimetres(26), BODY)
+  const weigh = breakLines(day.weigh, columns[1]! - millimetres(26), BODY_SIZE)
   const figureWidth = day.water.figure ? textWidth(day.water.figure, 17, 'bold') + 8 : 0
   const given = millimetres(33)
-  const water = breakLines(day.water.label, columns[2]! - PAD * 2 - figureWidth - given + 4, BODY)
-  const note = breakLines(continued ? 'continued' : day.note, columns[0]! - PAD * 2, BODY)
-  const label = breakLines([strong(day.label)], columns[0]! - PAD * 2, 16)
-  const height = Math.max(DAY_ROW, linesHeight(label, 16) + linesHeight(note, BODY) + 2, linesHeight(weigh, BODY) + 7, linesHeight(water, BODY) + 7)
+  const water = breakLines(day.water.label, columns[2]! - CELL_PAD * 2 - figureWidth - given + 4, BODY_SIZE)
+  const note = breakLines(continued ? 'continued' : day.note, columns[0]! - CELL_PAD * 2, BODY_SIZE)
+  const label = breakLines([strong(day.label)], columns[0]! - CELL_PAD * 2, 16)
+  const height = Math.max(DAY_ROW, linesHeight(label, 16) + linesHeight(note, BODY_SIZE) + 2, linesHeight(weigh, BODY_SIZE) + 7, linesHeight(water, BODY_SIZE) + 7)
   return {
     height,
     draw: (canvas, top) => {
       canvas.rule(0, top, BOX_WIDTH, top, 2.2)
-      const labelTop = top + (height - linesHeight(label, 16) - linesHeight(note, BODY)) / 2
-      canvas.lines(PAD, labelTop, label, 16)
-      canvas.lines(PAD, labelTop + linesHeight(label, 16), note, BODY)
+      const labelTop = top + (height - linesHeight(label, 16) - linesHeight(note, BODY_SIZE)) / 2
+      canvas.lines(CELL_PAD, labelTop, label, 16)
+      canvas.lines(CELL_PAD, labelTop + linesHeight(label, 16), note, BODY_SIZE)
 
-      const second = columns[0]! + PAD
-      canvas.lines(second, top + (height - linesHeight(weigh, BODY)) / 2, weigh, BODY)
-      drawWriteIn(canvas, columns[0]! + columns[1]! - millimetres(25), columns[0]! + columns[1]! - PAD, top + height - 9, '', 'g', LARGE)
+      const second = columns[0]! + CELL_PAD
+      canvas.lines(second, top + (height - linesHeight(weigh, BODY_SIZE)) / 2, weigh, BODY_SIZE)
+      drawWriteIn(canvas, columns[0]! + columns[1]! - millimetres(25), columns[0]! + columns[1]! - CELL_PAD, top + height - 9, '', 'g', LARGE_SIZE)
 
-      const third = columns[0]! + columns[1]! + PAD
-      canvas.lines(third, top + (height - linesHeight(water, BODY)) / 2, water, BODY)
+      const third = columns[0]! + columns[1]! + CELL_PAD
+      canvas.lines(third, top + (height - linesHeight(water, BODY_SIZE)) / 2, water, BODY_SIZE)
       if (day.water.figure) {
-        canvas.text(BOX_WIDTH - given - PAD - 6, middleBaseline(top, height, 17), day.water.figure, { size: 17, weight: 'bold', align: 'right' })
-        drawWriteIn(canvas, BOX_WIDTH - given - PAD + 2, BOX_WIDTH - PAD, top + height - 9, 'given', 'mL')
+        canvas.text(BOX_WIDTH - given - CELL_PAD - 6, middleBaseline(top, height, 17), day.water.figure, { size: 17, weight: 'bold', align: 'right' })
+        drawWriteIn(canvas, BOX_WIDTH - given - CELL_PAD + 2, BOX_WIDTH - CELL_PAD, top + height - 9, 'given', 'mL')
       }
-      else if (day.water.label.endsWith(':')) drawWriteIn(canvas, BOX_WIDTH - given - PAD, BOX_WIDTH - PAD, top + height - 9, '', '')
-      drawSides(canvas, columns, top, height)
+      else if (day.water.label.endsWith(':')) drawWriteIn(canvas, BOX_WIDTH - given - CELL_PAD, BOX_WIDTH - CELL_PAD, top + height - 9, '', '')
+      drawRowSides(canvas, columns, top, height)
     },
   }
 }
@@ -88,13 +64,13 @@ export function logRowBlock(stretch: Stretch, row: LogRow): Block {
     height: WRITE_ROW,
     draw: (canvas, top) => {
       if (part) {
-        canvas.text(PAD, top + 16, clock, { size: 17, weight: 'bold' })
-        canvas.text(PAD, top + 29, part, { size: BODY, weight: 'bold' })
+        canvas.text(CELL_PAD, top + 16, clock, { size: 17, weight: 'bold' })
+        canvas.text(CELL_PAD, top + 29, part, { size: BODY_SIZE, weight: 'bold' })
       }
-      else canvas.text(PAD, middleBaseline(top, WRITE_ROW, 17), clock, { size: 17, weight: 'bold' })
-      const give = columns[0]! + PAD
+      else canvas.text(CELL_PAD, middleBaseline(top, WRITE_ROW, 17), clock, { size: 17, weight: 'bold' })
+      const give = columns[0]! + CELL_PAD
       canvas.text(give, row.giveNote ? top + 16 : middleBaseline(top, WRITE_ROW, 18), row.give, { size: 18, weight: 'bold' })
-      if (row.giveNote) canvas.text(give, top + 29, row.giveNote, { size: BODY })
+      if (row.giveNote) canvas.text(give, top + 29, row.giveNote, { size: BODY_SIZE })
       drawCells(canvas, stretch, columns, top)
     },
   }
@@ -108,7 +84,7 @@ export function spareRowBlock(stretch: Stretch): Block {
   return {
     height: WRITE_ROW,
     draw: (canvas, top) => {
-      canvas.text(PAD, middleBaseline(top, WRITE_ROW, BODY), spare, { size: BODY })
+      canvas.text(CELL_PAD, middleBaseline(top, WRITE_ROW, BODY_SIZE), spare, { size: BODY_SIZE })
       drawCells(canvas, stretch, [0, columns[0]! + columns[1]!, ...columns.slice(2)], top)
     },
   }
@@ -118,10 +94,10 @@ function drawCells(canvas: Canvas, stretch: Stretch, columns: readonly number[],
   let x = 0
   columns.forEach((width, index) => {
     if (isTick(stretch, index)) {
-      drawTick(canvas, x + PAD + 2, top + WRITE_ROW / 2)
-      if (index === 2) canvas.text(x + PAD + 2 + millimetres(5.5) + 5, middleBaseline(top, WRITE_ROW, BODY), 'yes', { size: BODY })
+      drawTick(canvas, x + CELL_PAD + 2, top + WRITE_ROW / 2)
+      if (index === 2) canvas.text(x + CELL_PAD + 2 + millimetres(5.5) + 5, middleBaseline(top, WRITE_ROW, BODY_SIZE), 'yes', { size: BODY_SIZE })
     }
     x += width
   })
-  drawSides(canvas, columns, top, WRITE_ROW)
+  drawRowSides(canvas, columns, top, WRITE_ROW)
 }

@@ -6,7 +6,7 @@ import { dayRowBlock, logHeadBlock, logRowBlock, spareRowBlock } from './drawLog
 import { drawSign } from './drawSign'
 import { PageFlow } from './pageFlow'
 import {
-  BODY, callsBlock, drawStateSign, drawTick, drawWriteIn, GAP, gapBlock, LARGE, paragraphBlock, stack, stateBandBlock, WRITE_ROW, type Block,
+  BODY_SIZE, callsBlock, drawStateSign, drawTick, drawWriteIn, BLOCK_GAP, gapBlock, LARGE_SIZE, paragraphBlock, stack, stateBandBlock, WRITE_ROW, type Block,
 } from './pageParts'
 import { plain, strong } from './richText'
 import type { LogDay, Notice, SheetModel, StepBox, Stretch, StopBox } from './sheet'
@@ -43,22 +43,26 @@ function layOut(model: SheetModel): PageFlow {
   }
 
   if (model.notice) flow.placeWhole(noticeBlock(model.notice))
-  for (const stretch of model.stretches) placeStretch(flow, stretch, turnPage)
+  const [first] = model.stretches
+  model.stretches.forEach(stretch => placeStretch(flow, stretch, turnPage, stretch === first && model.notice !== null && stretch.band.state === 'wait'))
   if (boxes) flow.placeWhole(boxes)
-  flow.placeWhole(paragraphBlock(model.origin, BODY))
+  flow.placeWhole(paragraphBlock(model.origin, BODY_SIZE))
   return flow
 }
 
-function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void): void {
-  const lead = stack([stateBandBlock(stretch.band), amountsBlock(stretch.amounts, stretch.facts)])
+/** @param isUnderNotice  the notice right above has said WAIT already, larger. */
+function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void, isUnderNotice: boolean): void {
+  const amounts = amountsBlock(stretch.amounts, stretch.facts)
+  const withBand = stack([stateBandBlock(stretch.band), amounts])
   const head = logHeadBlock(stretch)
-  const spare = stack([spareRowBlock(stretch), gapBlock(GAP)])
+  const spare = stack([spareRowBlock(stretch), gapBlock(BLOCK_GAP)])
   const continued = continuedBlock(stretch)
   const longest = flow.roomOn(flow.page + 1) - heightOf(continued, head, spare)
   const days = stretch.days.map(day => ({ day, block: dayBlock(stretch, day) }))
 
   const first = days[0]!
   const beginning = first.block.height > longest ? splitBeginning(stretch, first.day) : first.block
+  const lead = isUnderNotice && flow.fits(amounts, head, beginning, spare) ? amounts : withBand
   if (!flow.fits(lead, head, beginning, spare) && !flow.isFresh) turnPage()
   flow.place(lead)
   let isOpen = false
@@ -127,7 +131,7 @@ function noticeBlock(notice: Notice): Block {
   const width = BOX_WIDTH - inset * 2
   const text = inset + millimetres(9)
   const reasons = notice.reasons.map((reason): Block => {
-    const block = stack([paragraphBlock([strong(reason.title)], 15, width - millimetres(9), text), paragraphBlock(reason.message, BODY, width - millimetres(9), text), gapBlock(3)])
+    const block = stack([paragraphBlock([strong(reason.title)], 15, width - millimetres(9), text), paragraphBlock(reason.message, BODY_SIZE, width - millimetres(9), text), gapBlock(3)])
     return {
       height: block.height,
       draw: (canvas, top) => {
@@ -143,11 +147,11 @@ function noticeBlock(notice: Notice): Block {
       draw: (canvas, top) => {
         drawStateSign(canvas, notice.state, inset + 8, top + 13)
         canvas.text(inset + 24, top + 21, notice.word, { size: 22, weight: 'bold' })
-        canvas.text(inset + 34 + canvas.width(notice.word, { size: 22, weight: 'bold' }), top + 21, 'before the first feed. Put right, then tick:', { size: LARGE })
+        canvas.text(inset + 34 + canvas.width(notice.word, { size: 22, weight: 'bold' }), top + 21, 'before the first feed. Put right, then tick:', { size: LARGE_SIZE })
       },
     },
     ...reasons,
-    paragraphBlock(notice.warm.join(' '), BODY, width, inset),
+    paragraphBlock(notice.warm.join(' '), BODY_SIZE, width, inset),
     {
       height: WRITE_ROW,
       draw: (canvas, top) => {
@@ -160,7 +164,7 @@ function noticeBlock(notice: Notice): Block {
     gapBlock(2),
   ])
   return {
-    height: body.height + GAP,
+    height: body.height + BLOCK_GAP,
     draw: (canvas, top) => {
       canvas.frame(0, top, BOX_WIDTH, body.height, 2.4, 7)
       body.draw(canvas, top)
@@ -170,9 +174,9 @@ function noticeBlock(notice: Notice): Block {
 
 /** Boxes in two columns: what to mix on the left, how to give it on the right. */
 export function boxesBlock(boxes: readonly StepBox[]): Block {
-  const width = (BOX_WIDTH - GAP * 2) / 2
+  const width = (BOX_WIDTH - BLOCK_GAP * 2) / 2
   const left = stack(boxes.slice(0, -1).map(box => stepBoxBlock(box, width, 0)))
-  const right = stepBoxBlock(boxes.at(-1)!, boxes.length === 1 ? BOX_WIDTH : width, boxes.length === 1 ? 0 : width + GAP * 2)
+  const right = stepBoxBlock(boxes.at(-1)!, boxes.length === 1 ? BOX_WIDTH : width, boxes.length === 1 ? 0 : width + BLOCK_GAP * 2)
   return {
     height: Math.max(left.height, right.height) + 4,
     draw: (canvas, top) => {
@@ -183,17 +187,17 @@ export function boxesBlock(boxes: readonly StepBox[]): Block {
 }
 
 function stepBoxBlock(box: StepBox, width: number, x: number): Block {
-  const title = breakLines([strong(box.title)], width, LARGE)
-  const items = box.lines.map(line => breakLines(line, width - 12, BODY))
+  const title = breakLines([strong(box.title)], width, LARGE_SIZE)
+  const items = box.lines.map(line => breakLines(line, width - 12, BODY_SIZE))
   return {
-    height: linesHeight(title, LARGE) + 8 + items.reduce((sum, lines) => sum + linesHeight(lines, BODY) + 2, 0) + 6,
+    height: linesHeight(title, LARGE_SIZE) + 8 + items.reduce((sum, lines) => sum + linesHeight(lines, BODY_SIZE) + 2, 0) + 6,
     draw: (canvas, top) => {
-      let y = top + canvas.lines(x, top, title, LARGE) + 2
+      let y = top + canvas.lines(x, top, title, LARGE_SIZE) + 2
       canvas.fill(x, y, width, 2)
       y += 6
       for (const lines of items) {
-        canvas.text(x + 1, y + 11.5, '•', { size: BODY, weight: 'bold' })
-        y += canvas.lines(x + 12, y, lines, BODY) + 2
+        canvas.text(x + 1, y + 11.5, '•', { size: BODY_SIZE, weight: 'bold' })
+        y += canvas.lines(x + 12, y, lines, BODY_SIZE) + 2
       }
     },
   }
@@ -207,15 +211,15 @@ export function stopBlock(stop: StopBox): Block {
   const left = inset + wordWidth
   const width = BOX_WIDTH - left - inset
   const column = (width - 10) / 2
-  const signs = [...stop.signs.map(plain), strong(stop.weight), strong(stop.order)].map(sign => breakLines([sign], column - 11, BODY))
+  const signs = [...stop.signs.map(plain), strong(stop.weight), strong(stop.order)].map(sign => breakLines([sign], column - 11, BODY_SIZE))
   const half = splitAt(signs.map(lines => lines.length))
   const columns = [signs.slice(0, half), signs.slice(half)]
-  const signsHeight = Math.max(...columns.map(lines => lines.reduce((sum, one) => sum + linesHeight(one, BODY) + 1, 0)))
+  const signsHeight = Math.max(...columns.map(lines => lines.reduce((sum, one) => sum + linesHeight(one, BODY_SIZE) + 1, 0)))
   const calls = callsBlock(stop.calls, left, width)
   const last = breakLines([strong(stop.last)], BOX_WIDTH - inset * 2, 16)
   const height = frame * 2 + 10 + signsHeight + 4 + calls.height + linesHeight(last, 16) + 6
   return {
-    height: height + GAP,
+    height: height + BLOCK_GAP,
     draw: (canvas, top) => {
       canvas.frame(0, top, BOX_WIDTH, height, frame)
       canvas.text(inset, top + 33, 'STOP', { size: 30, weight: 'bold' })
@@ -225,8 +229,8 @@ export function stopBlock(stop: StopBox): Block {
         let lineTop = y
         for (const one of lines) {
           // The last line is the order, not a sign.
-          if (one !== signs.at(-1)) canvas.text(left + index * (column + 10), lineTop + 11.5, '•', { size: BODY, weight: 'bold' })
-          lineTop += canvas.lines(left + index * (column + 10) + 11, lineTop, one, BODY) + 1
+          if (one !== signs.at(-1)) canvas.text(left + index * (column + 10), lineTop + 11.5, '•', { size: BODY_SIZE, weight: 'bold' })
+          lineTop += canvas.lines(left + index * (column + 10) + 11, lineTop, one, BODY_SIZE) + 1
         }
       })
       calls.draw(canvas, y + signsHeight + 4)
@@ -249,13 +253,13 @@ function splitAt(heights: readonly number[]): number {
 /** One line on later pages: the stop box is on the first. */
 function reminderBlock(stop: StopBox): Block {
   const call = stop.calls.find(line => line.phone)
-  const lines = breakLines([strong(`STOP & CALL signs: page 1. ${stop.last}`), ...call ? [plain(` ${call.role}:\u00A0`), strong(held(call.phone!))] : []], BOX_WIDTH, BODY)
-  const height = linesHeight(lines, BODY) + 9
+  const lines = breakLines([strong(`STOP & CALL signs: page 1. ${stop.last}`), ...call ? [plain(` ${call.role}:\u00A0`), strong(held(call.phone!))] : []], BOX_WIDTH, BODY_SIZE)
+  const height = linesHeight(lines, BODY_SIZE) + 9
   return {
     height: height + 4,
     draw: (canvas, top) => {
       canvas.fill(0, top, BOX_WIDTH, 3)
-      canvas.lines(0, top + 6, lines, BODY)
+      canvas.lines(0, top + 6, lines, BODY_SIZE)
     },
   }
 }

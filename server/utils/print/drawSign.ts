@@ -1,11 +1,12 @@
 /** The full-page DO NOT FEED: clipped on top of everything else. It carries no amount of any kind. */
 import { BOX_WIDTH, linesHeight, millimetres, middleBaseline, type Canvas } from './canvas'
 import { PageFlow } from './pageFlow'
-import { BODY, callsBlock, drawWriteIn, GAP, gapBlock, LARGE, paragraphBlock, stack, WRITE_ROW, type Block } from './pageParts'
+import { callsBlock, drawWriteIn, BLOCK_GAP, gapBlock, LARGE_SIZE, paragraphBlock, stack, WRITE_ROW, type Block } from './pageParts'
 import type { Notice, SheetModel, StopBox } from './sheet'
 import { sheetFrame } from './sheetFrame'
 import { strong } from './richText'
 import { breakLines, textWidth } from './shaping'
+import { emptyRowBlock, headRowBlock } from './tableParts'
 
 const CHECK_HEADS = ['Time', 'Warmth (°C)', 'What you see', 'Checked by']
 const CHECK_COLUMNS = [36, 32, 76, 36].map(millimetres)
@@ -15,18 +16,19 @@ export function drawSign(canvas: Canvas, model: SheetModel, notice: Notice): voi
   const flow = new PageFlow(sheetFrame(model, page => page === 0 ? callBlock(model.stop) : null))
   flow.place(wordBlock(notice.word))
   for (const reason of notice.reasons) {
-    flow.placeWhole(stack([paragraphBlock([strong(reason.title)], 24), paragraphBlock(reason.message, LARGE), gapBlock(8)]))
+    flow.placeWhole(stack([paragraphBlock([strong(reason.title)], 24), paragraphBlock(reason.message, LARGE_SIZE), gapBlock(8)]))
   }
-  flow.placeWhole(stack([paragraphBlock([strong(notice.warm.join(' '))], 16), gapBlock(4), nextCheckBlock(), gapBlock(GAP)]))
-  const head = checkHeadBlock()
-  if (flow.fits(head, checkRowBlock(), gapBlock(WRITE_ROW))) {
+  flow.placeWhole(stack([paragraphBlock([strong(notice.warm.join(' '))], 16), gapBlock(4), nextCheckBlock(), gapBlock(BLOCK_GAP)]))
+  const head = headRowBlock(CHECK_HEADS, CHECK_COLUMNS)
+  if (flow.fits(head, emptyRowBlock(CHECK_COLUMNS), gapBlock(WRITE_ROW))) {
     flow.place(head)
-    for (let row = 0; row < MOST_CHECK_ROWS && flow.fits(checkRowBlock()); row++) flow.place(checkRowBlock())
+    for (let row = 0; row < MOST_CHECK_ROWS && flow.fits(emptyRowBlock(CHECK_COLUMNS)); row++) flow.place(emptyRowBlock(CHECK_COLUMNS))
   }
   flow.draw(canvas)
 }
 
-function wordBlock(word: string): Block {
+/** The word across the whole width, white on black. */
+export function wordBlock(word: string): Block {
   const size = Math.min(80, 80 * (BOX_WIDTH - 28) / textWidth(word, 80, 'bold'))
   const height = size * 1.25
   return {
@@ -45,40 +47,11 @@ function nextCheckBlock(): Block {
     draw: (canvas, top) => {
       const baseline = top + height - 8
       canvas.text(0, baseline, 'Next check:', { size: 17, weight: 'bold' })
-      drawWriteIn(canvas, 102, 245, baseline, 'day', '', LARGE)
-      drawWriteIn(canvas, 257, 365, baseline, 'time', '', LARGE)
-      drawWriteIn(canvas, 377, BOX_WIDTH, baseline, 'by', '', LARGE)
+      drawWriteIn(canvas, 102, 245, baseline, 'day', '', LARGE_SIZE)
+      drawWriteIn(canvas, 257, 365, baseline, 'time', '', LARGE_SIZE)
+      drawWriteIn(canvas, 377, BOX_WIDTH, baseline, 'by', '', LARGE_SIZE)
     },
   }
-}
-
-function checkHeadBlock(): Block {
-  const height = 23
-  return {
-    height,
-    draw: (canvas, top) => {
-      let x = 0
-      canvas.rule(0, top, BOX_WIDTH, top, 1.6)
-      CHECK_HEADS.forEach((head, index) => {
-        canvas.text(x + 5, middleBaseline(top, height, BODY), head, { size: BODY, weight: 'bold' })
-        x += CHECK_COLUMNS[index]!
-      })
-      drawCheckSides(canvas, top, height)
-    },
-  }
-}
-
-function checkRowBlock(): Block {
-  return { height: WRITE_ROW, draw: (canvas, top) => drawCheckSides(canvas, top, WRITE_ROW) }
-}
-
-function drawCheckSides(canvas: Canvas, top: number, height: number) {
-  let x = 0
-  for (const width of [0, ...CHECK_COLUMNS]) {
-    x += width
-    canvas.rule(x, top, x, top + height, 0.8)
-  }
-  canvas.rule(0, top + height, BOX_WIDTH, top + height, 0.8)
 }
 
 function callBlock(stop: StopBox): Block {
@@ -88,7 +61,7 @@ function callBlock(stop: StopBox): Block {
   const last = breakLines([strong(stop.last)], BOX_WIDTH - inset * 2, 18)
   const height = calls.height + linesHeight(last, 18) + 24
   return {
-    height: height + GAP,
+    height: height + BLOCK_GAP,
     draw: (canvas, top) => {
       canvas.frame(0, top, BOX_WIDTH, height, 3.4)
       canvas.text(inset, top + 36, 'CALL', { size: 30, weight: 'bold' })

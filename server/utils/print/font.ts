@@ -24,12 +24,17 @@ export function printFont(weight: PrintWeight): TrueTypeFont {
   return font
 }
 
+/** Where this code runs: a source file in tests, the build folder in development, the entry of the built server. */
+function startingFolders(): string[] {
+  return [dirname(fileURLToPath(import.meta.url)), dirname(resolve(process.argv[1] ?? '.')), process.cwd()]
+}
+
 /**
- * Walks up from where this code runs: the source folder in tests, the build folder in development, and the entry of
- * the built server, whatever the working directory is.
+ * Walks up from each folder until the file is found, so that the working directory does not matter.
+ * @throws Error when the font is found nowhere.
  */
-function findFontFile(file: string): string {
-  for (const start of [dirname(fileURLToPath(import.meta.url)), dirname(resolve(process.argv[1] ?? '.')), process.cwd()]) {
+export function findFontFile(file: string, folders: readonly string[] = startingFolders()): string {
+  for (const start of folders) {
     for (let folder = start; ; folder = dirname(folder)) {
       const found = FOLDERS.map(name => join(folder, name, file)).find(path => existsSync(path))
       if (found) return found

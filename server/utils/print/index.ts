@@ -1,7 +1,11 @@
 /** Everything that is printed. A plan goes in, a PDF comes out; nothing is calculated here. */
 import type { Plan } from '#shared/types/plan'
 import type { DocumentInfo } from './canvas'
+import { drawLabels } from './drawLabel'
+import { drawMixingCard } from './drawMixingCard'
 import { drawSheet } from './drawSheet'
+import { labelModel } from './label'
+import { mixingCardModel } from './mixingCard'
 import type { PrintOptions } from './options'
 import { sheetModel } from './sheet'
 
@@ -15,6 +19,24 @@ export type { PrintContact, PrintOptions, PrintReference } from './options'
 export async function sheetPdf(plan: Plan, options: PrintOptions): Promise<Buffer> {
   const model = sheetModel(plan, options)
   return drawSheet(model, options.paper, infoOf(model.title, 'Feeding sheet', options))
+}
+
+/**
+ * The card for the kitchen: what to weigh and measure, in steps, and labels for the pots.
+ * @throws SheetRefusedError when something a mixer needs is missing.
+ */
+export async function mixingPdf(plan: Plan, options: PrintOptions): Promise<Buffer> {
+  const model = mixingCardModel(plan, options)
+  return drawMixingCard(model, options.paper, infoOf(model.title, 'Mixing card', options))
+}
+
+/**
+ * Strips of half a page for the tub or the syringe box, one for each amount.
+ * @throws SheetRefusedError when something a carer needs is missing.
+ */
+export async function labelPdf(plan: Plan, options: PrintOptions): Promise<Buffer> {
+  const model = labelModel(plan, options)
+  return drawLabels(model, options.paper, infoOf(model.title, 'Label', options))
 }
 
 function infoOf(title: string, subject: string, options: PrintOptions): DocumentInfo {

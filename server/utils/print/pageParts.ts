@@ -12,11 +12,11 @@ export interface Block {
 }
 
 /** Body text, pt. Nothing on paper is smaller. */
-export const BODY = 12
-export const LARGE = 14
+export const BODY_SIZE = 12
+export const LARGE_SIZE = 14
 /** A row that a hand writes in. */
 export const WRITE_ROW = millimetres(12)
-export const GAP = millimetres(3)
+export const BLOCK_GAP = millimetres(3)
 
 export function paragraphBlock(text: RichText, size: number, width = BOX_WIDTH, left = 0): Block {
   const lines = breakLines(text, width, size)
@@ -48,7 +48,7 @@ export function drawTick(canvas: Canvas, x: number, middle: number): void {
 }
 
 /** "Label ______ unit": a line to write on after a label, up to `right`. */
-export function drawWriteIn(canvas: Canvas, x: number, right: number, baseline: number, label: string, unit = '', size = BODY): void {
+export function drawWriteIn(canvas: Canvas, x: number, right: number, baseline: number, label: string, unit = '', size = BODY_SIZE): void {
   canvas.text(x, baseline, label, { size })
   const from = x + (label ? textWidth(label, size, 'regular') + 4 : 0)
   const unitWidth = unit ? textWidth(unit, size, 'regular') + 4 : 0
@@ -75,12 +75,12 @@ function nameLines(name: string, width: number) {
 function identifierBlock(identity: Identity, width: number): Block {
   const named = [identity.caseNumber && `Case ${identity.caseNumber}`, identity.enclosure].filter((text): text is string => Boolean(text))
   const missing = [...identity.caseNumber ? [] : ['Case'], ...identity.enclosure ? [] : ['Enclosure']]
-  const blocks: Block[] = named.length > 0 ? [paragraphBlock([strong(named.join(', '))], LARGE, width)] : []
+  const blocks: Block[] = named.length > 0 ? [paragraphBlock([strong(named.join(', '))], LARGE_SIZE, width)] : []
   if (missing.length > 0) {
     const each = width / missing.length
     blocks.push({
       height: WRITE_ROW,
-      draw: (canvas, top) => missing.forEach((label, index) => drawWriteIn(canvas, index * each, (index + 1) * each - 8, top + WRITE_ROW - 8, `${label}:`, '', LARGE)),
+      draw: (canvas, top) => missing.forEach((label, index) => drawWriteIn(canvas, index * each, (index + 1) * each - 8, top + WRITE_ROW - 8, `${label}:`, '', LARGE_SIZE)),
     })
   }
   return stack(blocks)
@@ -100,29 +100,29 @@ function supersededBlock(text: string): Block {
 /** The code with its caption on the left, or a note that there is none. Stands at the right edge. */
 function codeBlock(coded: Coded): { block: Block, width: number } {
   if (!coded.url) {
-    const lines = breakLines(coded.note, CAPTION_WIDTH, BODY)
+    const lines = breakLines(coded.note, CAPTION_WIDTH, BODY_SIZE)
     const width = CAPTION_WIDTH + 14
-    const height = linesHeight(lines, BODY) + 10
+    const height = linesHeight(lines, BODY_SIZE) + 10
     const draw = (canvas: Canvas, top: number) => {
       canvas.frame(BOX_WIDTH - width, top, width, height, 1)
-      canvas.lines(BOX_WIDTH - width + 7, top + 5, lines, BODY)
+      canvas.lines(BOX_WIDTH - width + 7, top + 5, lines, BODY_SIZE)
     }
     return { width, block: { height, draw } }
   }
   const { url } = coded
-  const caption = [[strong(coded.code!)], [plain(coded.version!)], [plain(coded.note)]].flatMap(text => breakLines(text, CAPTION_WIDTH, BODY))
+  const caption = [[strong(coded.code!)], [plain(coded.version!)], [plain(coded.note)]].flatMap(text => breakLines(text, CAPTION_WIDTH, BODY_SIZE))
   const right = BOX_WIDTH - CODE_SIDE - CODE_QUIET
   const draw = (canvas: Canvas, top: number) => {
     drawCode(canvas, BOX_WIDTH - CODE_SIDE, top, CODE_SIDE, url)
-    caption.forEach((line, index) => canvas.lines(right - line.width, top - 2 + linesHeight(caption.slice(0, index), BODY), [line], BODY))
+    caption.forEach((line, index) => canvas.lines(right - line.width, top - 2 + linesHeight(caption.slice(0, index), BODY_SIZE), [line], BODY_SIZE))
   }
-  return { width: CODE_SIDE + CODE_QUIET + CAPTION_WIDTH, block: { height: Math.max(CODE_SIDE + 2, linesHeight(caption, BODY) - 2), draw } }
+  return { width: CODE_SIDE + CODE_QUIET + CAPTION_WIDTH, block: { height: Math.max(CODE_SIDE + 2, linesHeight(caption, BODY_SIZE) - 2), draw } }
 }
 
 /** The head of the first page: who, where, when, and the square code. */
 export function headBlock(identity: Identity, dates: string, coded: Coded): Block {
   const code = codeBlock(coded)
-  const width = BOX_WIDTH - code.width - GAP
+  const width = BOX_WIDTH - code.width - BLOCK_GAP
   const name = nameLines(identity.name ?? '', width)
   const nameHeight = identity.name ? linesHeight(name.lines, name.size) : WRITE_ROW + 4
   const left = stack([
@@ -133,7 +133,7 @@ export function headBlock(identity: Identity, dates: string, coded: Coded): Bloc
         else drawWriteIn(canvas, 0, width - 8, top + nameHeight - 10, 'Name:', '', 22)
       },
     },
-    paragraphBlock([strong(identity.species), plain(`, ${identity.weight}`)], LARGE, width),
+    paragraphBlock([strong(identity.species), plain(`, ${identity.weight}`)], LARGE_SIZE, width),
     identifierBlock(identity, width),
   ])
   const upper: Block = {
@@ -146,7 +146,7 @@ export function headBlock(identity: Identity, dates: string, coded: Coded): Bloc
   return stack([
     ...coded.superseded ? [supersededBlock(coded.superseded)] : [],
     upper,
-    ...dates ? [paragraphBlock(dates, LARGE)] : [],
+    ...dates ? [paragraphBlock(dates, LARGE_SIZE)] : [],
     { height: 12, draw: (canvas, top) => canvas.fill(0, top + 2, BOX_WIDTH, 4) },
   ])
 }
@@ -154,13 +154,13 @@ export function headBlock(identity: Identity, dates: string, coded: Coded): Bloc
 /** The head of later pages. */
 export function shortHeadBlock(identity: Identity, coded: Coded): Block {
   const codeText = coded.code ? `${coded.code}, ${coded.version!.toLowerCase()}` : 'Not saved, no code'
-  const codeWidth = textWidth(codeText, BODY, 'regular')
+  const codeWidth = textWidth(codeText, BODY_SIZE, 'regular')
   const width = BOX_WIDTH - codeWidth - 16
   const size = 20
   const name = breakLines([strong(identity.name ?? 'Name:')], width, size)
-  const second = breakLines([identity.species, identity.caseNumber && `case ${identity.caseNumber}`, identity.enclosure, identity.weight].filter(Boolean).join(', '), BOX_WIDTH, BODY)
+  const second = breakLines([identity.species, identity.caseNumber && `case ${identity.caseNumber}`, identity.enclosure, identity.weight].filter(Boolean).join(', '), BOX_WIDTH, BODY_SIZE)
   const nameHeight = linesHeight(name, size)
-  const height = nameHeight + linesHeight(second, BODY)
+  const height = nameHeight + linesHeight(second, BODY_SIZE)
   return stack([
     ...coded.superseded ? [supersededBlock(coded.superseded)] : [],
     {
@@ -168,8 +168,8 @@ export function shortHeadBlock(identity: Identity, coded: Coded): Block {
       draw: (canvas, top) => {
         canvas.lines(0, top, name, size)
         if (!identity.name) canvas.rule(70, top + nameHeight - 5, width, top + nameHeight - 5, 0.8)
-        canvas.text(BOX_WIDTH, top + firstBaseline(size), codeText, { size: BODY, align: 'right' })
-        canvas.lines(0, top + nameHeight, second, BODY)
+        canvas.text(BOX_WIDTH, top + firstBaseline(size), codeText, { size: BODY_SIZE, align: 'right' })
+        canvas.lines(0, top + nameHeight, second, BODY_SIZE)
         canvas.fill(0, top + height + 3, BOX_WIDTH, 3)
       },
     },
@@ -181,21 +181,21 @@ const FOOT_BAND = millimetres(7.5)
 
 /** The foot of every page: the reversed band, then two lines. */
 export function footBlock(foot: FootLines, page: number, pages: number, extra = ''): Block {
-  const paragraphs = foot.lines.map((line, index) => breakLines(index === foot.lines.length - 1 && extra ? [...line, plain(` ${extra}`)] : line, BOX_WIDTH, BODY))
+  const paragraphs = foot.lines.map((line, index) => breakLines(index === foot.lines.length - 1 && extra ? [...line, plain(` ${extra}`)] : line, BOX_WIDTH, BODY_SIZE))
   const pageText = `page ${page} of ${pages}`
-  const room = BOX_WIDTH - 24 - textWidth(foot.band, LARGE, 'bold') - 16
-  const owner = breakLines([strong(foot.animal)], room - textWidth(pageText, BODY, 'bold') - 14, BODY)
-  const bandHeight = Math.max(FOOT_BAND, linesHeight(owner, BODY) + 6)
+  const room = BOX_WIDTH - 24 - textWidth(foot.band, LARGE_SIZE, 'bold') - 16
+  const owner = breakLines([strong(foot.animal)], room - textWidth(pageText, BODY_SIZE, 'bold') - 14, BODY_SIZE)
+  const bandHeight = Math.max(FOOT_BAND, linesHeight(owner, BODY_SIZE) + 6)
   return {
-    height: bandHeight + 4 + paragraphs.reduce((sum, lines) => sum + linesHeight(lines, BODY), 0),
+    height: bandHeight + 4 + paragraphs.reduce((sum, lines) => sum + linesHeight(lines, BODY_SIZE), 0),
     draw: (canvas, top) => {
       canvas.fill(0, top, BOX_WIDTH, bandHeight)
-      canvas.text(12, middleBaseline(top, bandHeight, LARGE), foot.band, { size: LARGE, weight: 'bold', tone: 'white' })
-      canvas.text(BOX_WIDTH - 12, middleBaseline(top, bandHeight, BODY), pageText, { size: BODY, weight: 'bold', tone: 'white', align: 'right' })
+      canvas.text(12, middleBaseline(top, bandHeight, LARGE_SIZE), foot.band, { size: LARGE_SIZE, weight: 'bold', tone: 'white' })
+      canvas.text(BOX_WIDTH - 12, middleBaseline(top, bandHeight, BODY_SIZE), pageText, { size: BODY_SIZE, weight: 'bold', tone: 'white', align: 'right' })
       const ownerWidth = Math.max(...owner.map(line => line.width))
-      canvas.lines(BOX_WIDTH - 12 - textWidth(pageText, BODY, 'bold') - 14 - ownerWidth, top + (bandHeight - linesHeight(owner, BODY)) / 2, owner, BODY, 'white')
+      canvas.lines(BOX_WIDTH - 12 - textWidth(pageText, BODY_SIZE, 'bold') - 14 - ownerWidth, top + (bandHeight - linesHeight(owner, BODY_SIZE)) / 2, owner, BODY_SIZE, 'white')
       let y = top + bandHeight + 4
-      for (const lines of paragraphs) y += canvas.lines(0, y, lines, BODY)
+      for (const lines of paragraphs) y += canvas.lines(0, y, lines, BODY_SIZE)
     },
   }
 }
@@ -203,14 +203,14 @@ export function footBlock(foot: FootLines, page: number, pages: number, extra = 
 const STATE_SIZE = 22
 
 /** FEED, WAIT or DO NOT FEED: a word, and a shape of its own so that it is known from across the room. */
-export function stateBandBlock(band: StateBand, right: RichText = [strong(band.days)], rightSize = LARGE): Block {
+export function stateBandBlock(band: StateBand, right: RichText = [strong(band.days)], rightSize = LARGE_SIZE): Block {
   const wordAt = millimetres(12)
   const wordWidth = textWidth(band.word, STATE_SIZE, 'bold')
   const rightLines = breakLines(right, BOX_WIDTH / 3, rightSize)
   const rightWidth = Math.max(0, ...rightLines.map(line => line.width))
   const reasonAt = wordAt + wordWidth + 12
-  const reason = breakLines(band.reason, BOX_WIDTH - reasonAt - rightWidth - 24, LARGE)
-  const height = Math.max(millimetres(11.5), linesHeight(reason, LARGE) + 9, linesHeight(rightLines, rightSize) + 6)
+  const reason = breakLines(band.reason, BOX_WIDTH - reasonAt - rightWidth - 24, LARGE_SIZE)
+  const height = Math.max(millimetres(11.5), linesHeight(reason, LARGE_SIZE) + 9, linesHeight(rightLines, rightSize) + 6)
   const tone = band.state === 'do-not-feed' ? 'white' : 'black'
   return {
     height: height + 5,
@@ -219,7 +219,7 @@ export function stateBandBlock(band: StateBand, right: RichText = [strong(band.d
       else canvas.frame(0, top, BOX_WIDTH, height, 2.4, band.state === 'wait' ? 7 : undefined)
       drawStateSign(canvas, band.state, millimetres(6), top + height / 2)
       canvas.text(wordAt, middleBaseline(top, height, STATE_SIZE), band.word, { size: STATE_SIZE, weight: 'bold', tone })
-      canvas.lines(reasonAt, top + (height - linesHeight(reason, LARGE)) / 2, reason, LARGE, tone)
+      canvas.lines(reasonAt, top + (height - linesHeight(reason, LARGE_SIZE)) / 2, reason, LARGE_SIZE, tone)
       canvas.lines(BOX_WIDTH - 10 - rightWidth, top + (height - linesHeight(rightLines, rightSize)) / 2, rightLines, rightSize, tone)
     },
   }
@@ -245,8 +245,8 @@ export function callsBlock(calls: readonly CallLine[], left: number, width: numb
   const each = width / 2
   const cells = calls.map((call) => {
     const text: Run[] = [plain(`${call.role}: `), ...call.name ? [strong(`${call.name} `)] : []]
-    const lines = breakLines(text, each - 10, BODY)
-    return { call, lines, height: call.phone ? linesHeight(lines, BODY) + 20 : linesHeight(lines, BODY) + WRITE_ROW - BODY }
+    const lines = breakLines(text, each - 10, BODY_SIZE)
+    return { call, lines, height: call.phone ? linesHeight(lines, BODY_SIZE) + 20 : linesHeight(lines, BODY_SIZE) + WRITE_ROW - BODY_SIZE }
   })
   const rows: typeof cells[] = []
   for (let i = 0; i < cells.length; i += 2) rows.push(cells.slice(i, i + 2))
@@ -254,8 +254,8 @@ export function callsBlock(calls: readonly CallLine[], left: number, width: numb
     height: Math.max(...row.map(cell => cell.height)),
     draw: (canvas, top) => row.forEach(({ call, lines, height }, index) => {
       const x = left + index * each
-      canvas.lines(x, top, lines, BODY)
-      const baseline = top + linesHeight(lines, BODY)
+      canvas.lines(x, top, lines, BODY_SIZE)
+      const baseline = top + linesHeight(lines, BODY_SIZE)
       if (call.phone) canvas.text(x, baseline + 14, call.phone, { size: 17, weight: 'bold' })
       else canvas.rule(x, top + height - 5, x + each - 14, top + height - 5, 0.8)
     }),

@@ -26,8 +26,27 @@ export function canPrint(text: string): boolean {
   return [...printable(text).replace(INVISIBLE, '')].every(letter => font.has(letter.codePointAt(0)!))
 }
 
+/** Shaped texts with their widths in ems: the same few hundred words come back on every sheet. */
+const shaped: Record<PrintWeight, Map<string, { letters: Letter[], width: number }>> = { regular: new Map(), bold: new Map() }
+/** Names come and go; the words of a sheet are soon known again. */
+const MOST_SHAPED = 4000
+
+function shapedText(text: string, weight: PrintWeight) {
+  const known = shaped[weight].get(text)
+  if (known) return known
+  const letters = shapeAnew(text, weight)
+  const entry = { letters, width: widthOf(letters, weight) }
+  if (shaped[weight].size >= MOST_SHAPED) shaped[weight].clear()
+  shaped[weight].set(text, entry)
+  return entry
+}
+
 /** @returns the letters of a text; a letter the font lacks is one box, however many code points it has. */
-export function shape(text: string, weight: PrintWeight): Letter[] {
+export function shape(text: string, weight: PrintWeight): readonly Letter[] {
+  return shapedText(text, weight).letters
+}
+
+function shapeAnew(text: string, weight: PrintWeight): Letter[] {
   const font = printFont(weight)
   const letters: Letter[] = []
   let complete = true
@@ -49,7 +68,7 @@ export function shape(text: string, weight: PrintWeight): Letter[] {
   })
 }
 
-/** Width of shaped letters with their kerning, in thousandths of the size. */
+/** Width of shaped letters with their kerning, in ems. */
 function widthOf(letters: readonly Letter[], weight: PrintWeight): number {
   const font = printFont(weight)
   let width = 0
@@ -62,7 +81,7 @@ function widthOf(letters: readonly Letter[], weight: PrintWeight): number {
 
 /** Width of a text, pt. */
 export function textWidth(text: string, size: number, weight: PrintWeight): number {
-  return widthOf(shape(text, weight), weight) * size
+  return shapedText(text, weight).width * size
 }
 
 /** One line of a paragraph: its pieces with their places, pt from the left. */

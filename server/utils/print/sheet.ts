@@ -83,8 +83,12 @@ const LOG_ROWS_ON_FLUIDS = 3
 export function heldToWeight(plan: Plan, day: PlanDay): PlanDay {
   const { weighedOn } = plan.animal
   const { goodUntil } = plan.validity
-  if (day.state !== 'feed' || goodUntil.trim() === '' || day.date <= goodUntil) return day
+  if (day.state === 'do-not-feed' || !isPastWeight(plan, day)) return day
   return { ...day, state: 'wait', stateReason: `Weigh it and make a new sheet: the weight of ${held(formatDay(weighedOn))} was good until ${held(formatDay(goodUntil))}`, feeds: [], strengthFraction: 0, strengthLabel: '' }
+}
+
+function isPastWeight(plan: Plan, day: PlanDay): boolean {
+  return plan.validity.goodUntil.trim() !== '' && day.date > plan.validity.goodUntil
 }
 
 /** @throws SheetRefusedError when something that a carer needs is missing; see `missingFor`. */
@@ -127,7 +131,8 @@ function noticeOf(plan: Plan): Notice | null {
   }
 }
 
-function stretchesOf(plan: Plan, days: readonly PlanDay[]): Stretch[] {
+/** Days in a row that share state and amounts, each with one band and one set of amounts. */
+export function stretchesOf(plan: Plan, days: readonly PlanDay[]): Stretch[] {
   const groups: PlanDay[][] = []
   for (const day of days) {
     const last = groups.at(-1)
@@ -152,7 +157,7 @@ function stretchOf(plan: Plan, days: PlanDay[]): Stretch {
     facts: feeding ? feedFacts(plan, first) : waitFacts(plan, first),
     heads: feeding
       ? ['Time', 'Give', warmEnoughHead(plan.animal), `Taken${NBSP}(mL)`, 'Brought up?', 'Droppings?', 'Initials']
-      : ['Time', `Fluid${NBSP}given (mL)`, 'How given', 'Warmth (°C)', 'Droppings?', 'Initials'],
+      : ['Time', `Fluid${NBSP}given (mL)`, 'How given', `Warmth${NBSP}(°C)`, 'Droppings?', 'Initials'],
     days: days.map(day => logDayOf(plan, day)),
     spare: feeding ? `Extra feed given${NBSP}at:` : null,
   }
@@ -165,7 +170,8 @@ function feedFacts(plan: Plan, day: PlanDay): string[] {
 
 function waitFacts(plan: Plan, day: PlanDay): string[] {
   // The notice above has said the first two already.
-  const warmth = plan.gate.state === 'wait' ? [] : [`${noFoodBelow(plan.animal)} ${keepWarmInWords(plan.animal)}`]
+  const early = day.stage === 'warm' || day.stage === 'fluids'
+  const warmth = plan.gate.state === 'wait' && early ? [] : [`${early ? `${noFoodBelow(plan.animal)} ` : ''}${keepWarmInWords(plan.animal)}`]
   return [...warmth, ...day.stage === 'warm' && day.waterToGiveMl === 0 ? [] : [`Fluids: ${plan.fluids.usualRoute}`]]
 }
 
@@ -179,12 +185,15 @@ function logDayOf(plan: Plan, day: PlanDay): LogDay {
     water: waterOf(plan, day),
     weigh: feeding ? `Weigh before the first${NBSP}feed:` : 'Weigh at the same time each day:',
     rows: feeding
-      ? day.feeds.map(feed => ({ time: held(formatClock(feed.localTime)), give: formatVolumeMl(feed.volumeMl), giveNote: feed.draws > 1 ? held(`${feed.draws} draws of ${formatVolumeMl(feed.markMl)}`) : '' }))
+      ? day.feeds.map(feed => ({ time: held(formatClock(feed.localTime)), give: formatVolumeMl(feed.volumeMl), giveNote: feed.draws > 1 ? held(`${feed.draws} × ${formatVolumeMl(feed.markMl)}`) : '' }))
       : Array.from({ length: early ? LOG_ROWS_ON_FLUIDS : 1 }, () => ({ time: '', give: '', giveNote: '' })),
   }
 }
 
-function waterOf(plan: Plan, day: PlanDay): LogDay['water'] {
+/** What to give besides feeds on one day. */
+export function waterOf(plan: Plan, day: PlanDay): LogDay['water'] {
+  // The water of such a day was worked out beside feeds that are not ordered.
+  if (isPastWeight(plan, day)) return { label: 'Water: see the new sheet', figure: null }
   const figure = waterInFigures(day)
   if (figure) return { label: day.feeds.length > 0 && day.state === 'feed' ? `Water on top of${NBSP}feeds:` : `Water to give in${NBSP}the${NBSP}day:`, figure }
   // Amphibians drink through the skin, so their plan names no volume.

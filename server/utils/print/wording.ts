@@ -181,10 +181,10 @@ export function waterInFigures(day: PlanDay): string | null {
 
 export function discardInWords(pot: PlanMixing): string {
   const { room, started, fridge } = pot.discardHours
-  return `Bin it ${hours(room)} after mixing at room warmth, ${hours(fridge)} in the fridge, ${hours(started)} once started.`
+  return `Bin it ${hoursInWords(room)} after mixing at room warmth, ${hoursInWords(fridge)} in the fridge, ${hoursInWords(started)} once started.`
 }
 
-export function hours(value: number): string {
+export function hoursInWords(value: number): string {
   if (value < 1) return formatQuantity(value * 60, 'minutes', 0)
   return formatQuantity(value, value === 1 ? 'hour' : 'hours', 1)
 }
