@@ -79,7 +79,7 @@ export function planDays(context: PlanContext, outline: RampOutline, energy: Pla
     const target = step !== null && isMealDay ? energy.targetKcalPerDay * step.fraction * daysPerMeal * (meal ? share : 1) : 0
     const water = waterOn(context, fluids, fluidsFromMs, day, offsets, meal, feeds, given)
     const stage = step === null ? (outline.warmHours > 0 && day === firstDay ? 'warm' : 'fluids') : step.fraction >= 1 && step.last ? 'full' : 'ramp'
-    const state = stateOn(context, stage, feeds.length > 0, isMealDay, closedReason, unmeasured)
+    const state = stateOn(context, stage, feeds.length > 0, isMealDay, closedReason, unmeasured, outline.fluidHours)
     if (meal && meal.bounds.length > 0) {
       const key = meal.bounds.join()
       if (!bounds.has(key)) bounds.set(key, { day, capMl: feedingDay < meals.firstCapMeals ? meals.firstCapMl : meals.laterCapMl, bounds: meal.bounds, given, target })
@@ -131,8 +131,10 @@ function firstFeedingDay(context: PlanContext, feeds: number, firstDay: number, 
   for (let day = firstDay; ; day += 1) {
     const slots = slotsOn(day, feeds)
     if (slots[0]! >= feedFromMs) return { day, partial: false }
-    // A bird or mammal is not made to wait for a new day; an ectotherm never is in such a hurry.
-    if (!context.ectotherm && slots.some(at => at >= feedFromMs)) return { day, partial: true }
+    // A bird or mammal is not made to wait for a new day, and nothing is that may eat now; an ectotherm coming out of a
+    // fluids-only stage never is in such a hurry.
+    const mayBeginToday = !context.ectotherm || feedFromMs === context.startMs
+    if (mayBeginToday && slots.some(at => at >= feedFromMs)) return { day, partial: true }
   }
 }
 
@@ -199,11 +201,11 @@ function waterOn(context: PlanContext, fluids: PlanFluids, fluidsFromMs: number,
   return { waterNeedMl: need, waterInFeedMl: inFeed, metabolicWaterMl: metabolic, waterToGiveMl: Math.max(0, need - inFeed - metabolic) }
 }
 
-function stateOn(context: PlanContext, stage: PlanDay['stage'], hasFeeds: boolean, isMealDay: boolean, closedReason: string | null, unmeasured: boolean): { state: GateState, stateReason: string } {
+function stateOn(context: PlanContext, stage: PlanDay['stage'], hasFeeds: boolean, isMealDay: boolean, closedReason: string | null, unmeasured: boolean, fluidHours: number): { state: GateState, stateReason: string } {
   const warmTo = `${formatNumber(context.species.feedingTemperatureC.low, 1)} °C`
   if (closedReason !== null) return { state: 'do-not-feed', stateReason: closedReason }
   if (stage === 'warm') return { state: context.bodyTemperatureC === null ? 'wait' : 'do-not-feed', stateReason: `Warm to ${warmTo} or more first, then fluids only` }
-  if (stage === 'fluids') return { state: 'wait', stateReason: 'Fluids only, no food yet' }
+  if (stage === 'fluids') return { state: 'wait', stateReason: fluidHours > 0 ? 'Fluids only, no food yet' : 'First feed tomorrow' }
   if (unmeasured) return { state: 'do-not-feed', stateReason: 'The meal is too small to measure: call a vet' }
   if (!isMealDay || !hasFeeds) return { state: 'wait', stateReason: 'No meal today' }
   return { state: 'feed', stateReason: `Only at ${warmTo} or more` }

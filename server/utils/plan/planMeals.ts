@@ -89,9 +89,11 @@ export function planMeals(context: PlanContext, energy: PlanEnergy, fluids: Plan
   }
 }
 
+interface MealLimit { first: number, later: number, firstMeals: number, mostMl?: number }
+
 function capsMl(context: PlanContext): { firstMl: number, laterMl: number, firstMeals: number, steps: EquationStep[] } {
   const { species, weightKg, weightG } = context
-  const limit = growingLimit(context) ?? species.mealLimitMlPerKg
+  const limit: MealLimit = growingLimit(context) ?? species.mealLimitMlPerKg
   const firstMl = Math.min(limit.first * weightKg, limit.mostMl ?? Number.POSITIVE_INFINITY)
   const laterMl = Math.min(limit.later * weightKg, limit.mostMl ?? Number.POSITIVE_INFINITY)
   const steps: EquationStep[] = [
@@ -102,7 +104,7 @@ function capsMl(context: PlanContext): { firstMl: number, laterMl: number, first
 }
 
 /** Young mammals and birds with a crop take more at a time than their parents. */
-function growingLimit(context: PlanContext): { first: number, later: number, firstMeals: number, mostMl?: number } | null {
+function growingLimit(context: PlanContext): MealLimit | null {
   if (context.input.animal.lifeStage !== 'growing') return null
   const { growing } = context.rules.meals
   const { species } = context

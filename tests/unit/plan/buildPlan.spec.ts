@@ -153,7 +153,7 @@ describe('meals', () => {
     for (const day of one.days.filter(day => day.feeds.length > 0)) expect(day.feeds).toHaveLength(2)
   })
   it('say what binds when a songbird cannot eat enough this way', () => {
-    const sparrow = plan({ animal: { speciesId: 'sp-house-sparrow', weightG: 18, bodyTemperatureC: 41, daysUnfed: 2, drynessPercent: 5 }, feed: { energyKcalPerMl: 0.6, waterFraction: 0.85 } })
+    const sparrow = plan({ animal: { speciesId: 'sp-robin', weightG: 14, bodyTemperatureC: 41, daysUnfed: 2, drynessPercent: 5 }, feed: { energyKcalPerMl: 0.6, waterFraction: 0.85 } })
     expect(codes(sparrow)).toContain('meal.capBinds')
     expect(sparrow.meal.binds.join(' ')).toContain('would free it')
   })
