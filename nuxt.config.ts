@@ -1,5 +1,7 @@
+import { randomBytes } from 'node:crypto'
 import { cpSync, mkdirSync } from 'node:fs'
 import { resolve } from 'node:path'
+import packageInfo from './package.json'
 
 export default defineNuxtConfig({
   modules: ['@nuxtjs/tailwindcss', '@pinia/nuxt', '@vueuse/nuxt', 'nuxt-auth-utils', 'nuxt-security', '@nuxt/eslint'],
@@ -25,6 +27,8 @@ export default defineNuxtConfig({
 
   // File names carry the feature already: components/plan/PlanBarrel.vue is <PlanBarrel>.
   components: [{ path: '~/components', pathPrefix: false }],
+  // Nobody signs in yet: no page needs the session, and asking for it would cost a request for each.
+  auth: { loadStrategy: 'none' },
   tailwindcss: { cssPath: ['~/assets/css/main.css', { injectPosition: 'first' }], viewer: false },
 
   runtimeConfig: {
@@ -32,10 +36,14 @@ export default defineNuxtConfig({
     dataDir: '.data',
     // Multiplies the limits of requests per address; raised in tests and benchmarks.
     rateLimitFactor: 1,
-    // The password is made on first start (server/plugins/00.secret.ts); secure cookies only where HTTPS is.
-    session: { name: 'thimbleful', password: '', maxAge: 60 * 60 * 24 * 30, cookie: { sameSite: 'lax', httpOnly: true, secure: false } },
-    public: { appVersion: '0.1.0' },
+    // The password is made on first start (server/plugins/00.secret.ts). The cookie says only which plans this browser knows;
+    // each link in it ends after 30 days by itself. Secure is set where the request came by https (guestPlans.ts).
+    session: { name: 'thimbleful', password: '', maxAge: 60 * 60 * 24 * 365, cookie: { sameSite: 'lax', httpOnly: true, secure: false } },
+    public: { appVersion: packageInfo.version },
   },
+
+  // While developing, the sealing password lives as long as the process: the cookie module would otherwise write one to .env.
+  $development: { runtimeConfig: { session: { password: randomBytes(32).toString('hex') } } },
 
   security: {
     // Plain http on a laptop or in a barn is the usual case: nothing may force https.
@@ -68,12 +76,15 @@ export default defineNuxtConfig({
 
   nitro: {
     compressPublicAssets: true,
-    errorHandler: '~~/server/error.ts',
     experimental: { openAPI: true },
-    openAPI: { production: 'runtime', route: '/_openapi.json', meta: { title: 'Thimbleful', description: 'Feeding plans for starved animals. Every number carries its unit in its name.', version: '0.1.0' }, ui: { scalar: false, swagger: false } },
+    openAPI: { production: 'runtime', route: '/_openapi.json', meta: { title: 'Thimbleful', description: 'Feeding plans for starved animals. Every number carries its unit in its name.', version: packageInfo.version }, ui: { scalar: false, swagger: false } },
   },
 
   hooks: {
+    // Ours answers for /api and leaves the rest to Nuxt's, which shows error.vue. Set in the configuration it would replace Nuxt's.
+    'nitro:config'(config) {
+      config.errorHandler = [resolve(config.rootDir ?? '.', 'server/error.ts'), ...[config.errorHandler ?? []].flat()]
+    },
     // Migrations and print fonts are read from disk: beside the built server, and in the sources while developing.
     'nitro:init'(nitro) {
       nitro.hooks.hook('compiled', () => {

@@ -11,7 +11,7 @@ let open: Db | null = null
 /** Folder of database, uploads and secret, made when missing. */
 export function dataFolder(): string {
   const folder = resolve(process.env.NUXT_DATA_DIR || '.data')
-  mkdirSync(folder, { recursive: true })
+  mkdirSync(folder, { recursive: true, mode: 0o700 })
   return folder
 }
 

@@ -1,4 +1,4 @@
-import { copyFileSync, existsSync, readFileSync } from 'node:fs'
+import { copyFileSync, existsSync, readFileSync, rmSync } from 'node:fs'
 import { join } from 'node:path'
 import type Database from 'better-sqlite3'
 import { migrate } from 'drizzle-orm/better-sqlite3/migrator'
@@ -7,7 +7,7 @@ import type { Db } from './client'
 interface Journal { entries: { when: number, tag: string }[] }
 
 /**
- * Brings a database to the newest migration, or throws and leaves a copy of what was there.
+ * Brings a database to the newest migration, or throws and leaves the database as it was.
  *
  * The order matters: SQLite rebuilds tables on many changes, and inside the migrator's transaction foreign keys cannot
  * be switched off any more, so a cascade would eat the child rows.
@@ -19,21 +19,26 @@ export function migrateDatabase(db: Db, migrationsFolder: string, now = new Date
   const due = dueMigrations(client, migrationsFolder)
   if (due === 0) return 0
   const before = rowCounts(client)
-  if (Object.keys(before).length > 0) copyAside(client, now)
+  const copy = Object.keys(before).length > 0 ? copyAside(client, now) : null
 
   client.pragma('foreign_keys = OFF')
-  try {
-    migrate(db, { migrationsFolder })
+  migrate(db, { migrationsFolder })
+  const surprise = surpriseAfter(client, before)
+  if (surprise) {
+    // The migration is in the file by now: without this, the next start would find nothing to do and go on.
+    if (copy) putBack(client, copy)
+    throw new Error(`${surprise} The database is as it was before${copy ? `, and so is its copy ${copy}` : ''}.`)
   }
-  finally {
-    client.pragma('foreign_keys = ON')
-  }
-  const broken = client.pragma('foreign_key_check') as unknown[]
-  if (broken.length > 0) throw new Error(`The migration left ${broken.length} rows without their parent. The copy beside the database is from before it.`)
-  const after = rowCounts(client)
-  const lost = Object.entries(before).filter(([table, count]) => table in after && after[table]! < count)
-  if (lost.length > 0) throw new Error(`The migration lost rows of ${lost.map(([table]) => table).join(', ')}. The copy beside the database is from before it.`)
+  client.pragma('foreign_keys = ON')
   return due
+}
+
+function surpriseAfter(client: Database.Database, before: Record<string, number>): string | null {
+  const broken = client.pragma('foreign_key_check') as unknown[]
+  if (broken.length > 0) return `The migration left ${broken.length} rows without their parent.`
+  const after = rowCounts(client)
+  const lost = Object.entries(before).filter(([table, count]) => count > (after[table] ?? 0)).map(([table]) => table)
+  return lost.length > 0 ? `The migration lost rows of ${lost.join(', ')}.` : null
 }
 
 function dueMigrations(client: Database.Database, migrationsFolder: string): number {
@@ -49,9 +54,20 @@ function rowCounts(client: Database.Database): Record<string, number> {
   return Object.fromEntries(tables.map(({ name }) => [name, (client.prepare(`select count(*) as count from "${name}"`).get() as { count: number }).count]))
 }
 
-function copyAside(client: Database.Database, now: Date): void {
-  if (client.memory || !existsSync(client.name)) return
+/** @returns the path of the copy; null for a database that lives in memory. */
+function copyAside(client: Database.Database, now: Date): string | null {
+  if (client.memory || !existsSync(client.name)) return null
   // What still stands in the write-ahead log belongs to the copy too.
   client.pragma('wal_checkpoint(TRUNCATE)')
-  copyFileSync(client.name, `${client.name}.before-${now.toISOString().replace(/[:.]/g, '-')}`)
+  const copy = `${client.name}.before-${now.toISOString().replace(/[:.]/g, '-')}`
+  copyFileSync(client.name, copy)
+  return copy
+}
+
+/** Closes the database and puts the copy in its place. */
+function putBack(client: Database.Database, copy: string): void {
+  const file = client.name
+  client.close()
+  for (const leftOver of ['-wal', '-shm']) rmSync(`${file}${leftOver}`, { force: true })
+  copyFileSync(copy, file)
 }

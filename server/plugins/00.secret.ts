@@ -12,5 +12,7 @@ export default defineNitroPlugin(() => {
   if (process.env.NUXT_SESSION_PASSWORD) return
   const file = join(dataFolder(), 'session-secret')
   if (!existsSync(file)) writeFileSync(file, randomBytes(32).toString('base64url'), { mode: 0o600, flag: 'wx' })
-  process.env.NUXT_SESSION_PASSWORD = readFileSync(file, 'utf8').trim()
+  const secret = readFileSync(file, 'utf8').trim()
+  if (secret.length < 32) throw new Error(`The secret in ${file} is cut short. Delete the file to have a new one made; browsers then forget their saved plans, links keep working.`)
+  process.env.NUXT_SESSION_PASSWORD = secret
 })

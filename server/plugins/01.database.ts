@@ -10,7 +10,14 @@ export default defineNitroPlugin(() => {
   const db = database()
   const applied = migrateDatabase(db, migrationsFolder())
   if (applied > 0) console.info(`Database: ${applied} ${applied === 1 ? 'migration' : 'migrations'} applied.`)
-  if (process.env.NUXT_SEED_DEMO !== 'false' && seedDemo(db)) console.info('Database: demo plans of Saltings Rescue added.')
+  if (process.env.NUXT_SEED_DEMO === 'false') return
+  try {
+    if (seedDemo(db)) console.info('Database: demo plans of Saltings Rescue added.')
+  }
+  catch (error) {
+    // Real plans do not depend on the demo: a rescue must not stand before a closed door because of it.
+    console.error('The demo plans could not be added.', error)
+  }
 })
 
 /** Beside the built server's entry, or in the sources while developing. */

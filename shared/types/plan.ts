@@ -304,6 +304,8 @@ export interface SavedRegimen {
   createdAt: string
   linkExpiresAt: string
   edition: string
+  /** An invented plan of the demonstration: anyone may look at it, nobody changes it. */
+  demo?: boolean
   input: import('../schemas/regimen').RegimenInput
   plan: Plan
 }

@@ -18,6 +18,11 @@ const RULES: { folder: string, may: string[], notPackages: RegExp, sentence: str
   { folder: 'stores', may: ['stores', 'utils', 'shared', 'composables'], notPackages: /^(mathjs|h3)/, sentence: 'stores/ import shared/ and utils/; no formula of any kind.' },
 ]
 
+/** Single imports that no rule allows, as "file imports what", each with its reason. */
+const SKIPS: Record<string, string> = {
+  'shared/types/rows.ts imports ../../server/db/schema': 'row types are inferred once from the tables; types only, checked below',
+}
+
 function importsOf(path: string): string[] {
   const patterns = [/\bfrom\s+['"]([^'"\n]+)['"]/g, /(?:^|\n)\s*import\s+['"]([^'"\n]+)['"]/g, /\bimport\(\s*['"]([^'"\n]+)['"]\s*\)/g]
   const code = textOf(path).replace(/\/\*[\s\S]*?\*\//g, '')
@@ -41,8 +46,17 @@ describe.each(RULES)('$folder', ({ folder, may, notPackages, sentence }) => {
       if (own === null) return notPackages.test(imported) ? [`${path} imports ${imported}`] : []
       return may.some(allowed => own === allowed || own.startsWith(`${allowed}/`)) ? [] : [`${path} imports ${imported}`]
     }))
-    expect(wrong, sentence).toEqual([])
+    expect(wrong.filter(one => !(one in SKIPS)), sentence).toEqual([])
   })
+})
+
+it('keeps its skip list honest', () => {
+  for (const [skipped, reason] of Object.entries(SKIPS)) {
+    const [path, imported] = skipped.split(' imports ') as [string, string]
+    expect(importsOf(path), `${skipped} is no longer so: take it off the list`).toContain(imported)
+    expect(reason.length).toBeGreaterThan(10)
+  }
+  expect(textOf('shared/types/rows.ts')).toMatch(/^import type .* from '\.\.\/\.\.\/server\/db\/schema'$/m)
 })
 
 it('finds the imports it judges', () => {

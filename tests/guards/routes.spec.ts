@@ -5,6 +5,7 @@ const routes = filesUnder('server/api', ['.ts'])
 
 /** Every route is open to guests in this release; what each lets them see is said here, so that a new route must be. */
 const PUBLIC: Record<string, string> = {
+  'server/api/[...].ts': 'answers only that there is nothing at an address',
   'server/api/health.get.ts': 'says only that the server is up, and its edition',
   'server/api/reference/species.get.ts': 'published figures, the same for everyone',
   'server/api/reference/foods.get.ts': 'published figures, the same for everyone',

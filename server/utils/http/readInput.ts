@@ -45,7 +45,8 @@ async function bodyText(event: H3Event): Promise<string> {
   if (ready !== undefined) return typeof ready === 'string' ? ready : JSON.stringify(ready)
   const chunks: Buffer[] = []
   let bytes = 0
-  for await (const chunk of event.node.req as AsyncIterable<Buffer>) {
+  // Leaving the loop early must not cut the connection: the answer still has to go out on it.
+  for await (const chunk of event.node.req.iterator({ destroyOnReturn: false }) as AsyncIterable<Buffer>) {
     bytes += chunk.length
     if (bytes > MOST_BODY_BYTES) throw tooLarge()
     chunks.push(chunk)

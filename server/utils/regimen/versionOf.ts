@@ -15,6 +15,7 @@ export function versionOf(row: RegimenRow, version = row.latestVersion): SavedRe
     createdAt: found.createdAt,
     linkExpiresAt: row.linkExpiresAt,
     edition: found.edition,
+    ...(row.demo && { demo: true }),
     input: JSON.parse(found.inputJson) as RegimenInput,
     plan: JSON.parse(found.planJson) as Plan,
   }

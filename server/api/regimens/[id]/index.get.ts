@@ -10,8 +10,9 @@ defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'A saved plan, as it was 
 export default defineEventHandler(async (event): Promise<SavedRegimen> => {
   const { id } = readParamsOf(event, RegimenParams)
   const { key, version } = readQueryOf(event, RegimenQuery)
-  const row = await requireRegimen(event, id, key)
-  if (key) await rememberGuestPlan(event, { id, key })
+  const row = await requireRegimen(event, id, key, 'look')
+  // Opened by its link, a plan is in this browser's list from now on.
+  if (key && !row.demo) await rememberGuestPlan(event, { id, key })
   setResponseHeader(event, 'cache-control', 'private, no-store')
   return versionOf(row, version)
 })

@@ -11,7 +11,7 @@ export default defineEventHandler(async (event) => {
   await limitRequests(event, 'print', useRuntimeConfig(event).rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
   const query = readQueryOf(event, SheetQuery)
-  const row = await requireRegimen(event, id, query.key)
+  const row = await requireRegimen(event, id, query.key, 'look')
   const regimen = versionOf(row, query.version)
   return sendPdf(event, 'label', { plan: regimen.plan, input: regimen.input, saved: { regimen, key: query.key } }, query)
 })
