@@ -3,7 +3,7 @@ import { z } from 'zod'
 
 /** A number out of an address. An empty text would become 0, so it is refused before it is read. */
 const queryNumber = (what: string, unit: string, low: number, high: number) => {
-  const sentence = `Give ${what} as a number${unit && ` in ${unit}`}, from ${low} to ${high}.`
+  const sentence = `Give ${what} as a number${unit && ` in ${unit}`}, from ${low} to ${high.toLocaleString('en-GB')}.`
   return z.string({ error: sentence }).trim().regex(/^[+-]?(\d+\.?\d*|\.\d+)(e[+-]?\d+)?$/i, sentence)
     .transform(Number).pipe(z.number({ error: sentence }).min(low, sentence).max(high, sentence)).optional()
 }

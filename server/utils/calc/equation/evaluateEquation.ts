@@ -99,9 +99,9 @@ function conversionsOf(record: EquationItem): Conversion[] {
 function scopeOf(record: EquationItem, variables: Record<string, number>): Record<string, number> {
   const scope: Record<string, number> = {}
   for (const name in record.constants) scope[name] = record.constants[name]!.value
-  for (const { name, meaning } of record.variables) {
+  for (const { name, meaning, unit } of record.variables) {
     const value = variables[name]
-    if (value === undefined || !Number.isFinite(value)) throw new CalcInputError('equation.variable', `This equation needs ${meaning}.`, { path: name, received: value })
+    if (value === undefined || !Number.isFinite(value)) throw new CalcInputError('equation.variable', `This equation needs ${meaning}, in ${unit}.`, { path: name, received: value })
     scope[name] = value
   }
   return scope
