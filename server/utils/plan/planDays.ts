@@ -79,10 +79,12 @@ export function planDays(context: PlanContext, outline: RampOutline, energy: Pla
     const target = step !== null && isMealDay ? energy.targetKcalPerDay * step.fraction * daysPerMeal * (meal ? share : 1) : 0
     const water = waterOn(context, fluids, fluidsFromMs, day, offsets, meal, feeds, given)
     const stage = step === null ? (outline.warmHours > 0 && day === firstDay ? 'warm' : 'fluids') : step.fraction >= 1 && step.last ? 'full' : 'ramp'
-    const state = stateOn(context, stage, feeds.length > 0, isMealDay, closedReason, unmeasured, outline.fluidHours)
+    const state = stateOn(context, stage, feeds, isMealDay, closedReason, unmeasured, outline.fluidHours, partial && outline.fluidHours + outline.warmHours > 0)
     if (meal && meal.bounds.length > 0) {
+      // Of days bound in the same way the one that falls shortest is told.
       const key = meal.bounds.join()
-      if (!bounds.has(key)) bounds.set(key, { day, capMl: feedingDay < meals.firstCapMeals ? meals.firstCapMl : meals.laterCapMl, bounds: meal.bounds, given, target })
+      const known = bounds.get(key)
+      if (!known || given / target < known.given / known.target - 1e-9) bounds.set(key, { day, capMl: feedingDay < meals.firstCapMeals ? meals.firstCapMl : meals.laterCapMl, bounds: meal.bounds, given, target })
     }
     if (meal && slots.length > 0) feedingDay += 1
     days.push({
@@ -172,7 +174,7 @@ function feedsOf(context: PlanContext, meal: ChosenMeal, slots: readonly number[
     energyKcal: measured.volumeMl * context.feed.energyKcalPerMl * meal.strengthFraction,
     toleranceMl,
     toleranceFraction: toleranceMl / measured.volumeMl,
-    roundingFraction: measured.volumeMl / meal.wantedMl - 1,
+    roundingFraction: measured.roundingFraction,
   }))
 }
 
@@ -201,13 +203,14 @@ function waterOn(context: PlanContext, fluids: PlanFluids, fluidsFromMs: number,
   return { waterNeedMl: need, waterInFeedMl: inFeed, metabolicWaterMl: metabolic, waterToGiveMl: Math.max(0, need - inFeed - metabolic) }
 }
 
-function stateOn(context: PlanContext, stage: PlanDay['stage'], hasFeeds: boolean, isMealDay: boolean, closedReason: string | null, unmeasured: boolean, fluidHours: number): { state: GateState, stateReason: string } {
+function stateOn(context: PlanContext, stage: PlanDay['stage'], feeds: readonly PlanFeed[], isMealDay: boolean, closedReason: string | null, unmeasured: boolean, fluidHours: number, fluidsFirst: boolean): { state: GateState, stateReason: string } {
   const warmTo = `${formatNumber(context.species.feedingTemperatureC.low, 1)} °C`
   if (closedReason !== null) return { state: 'do-not-feed', stateReason: closedReason }
   if (stage === 'warm') return { state: context.bodyTemperatureC === null ? 'wait' : 'do-not-feed', stateReason: `Warm to ${warmTo} or more first, then fluids only` }
   if (stage === 'fluids') return { state: 'wait', stateReason: fluidHours > 0 ? 'Fluids only, no food yet' : 'First feed tomorrow' }
   if (unmeasured) return { state: 'do-not-feed', stateReason: 'The meal is too small to measure: call a vet' }
-  if (!isMealDay || !hasFeeds) return { state: 'wait', stateReason: 'No meal today' }
+  if (!isMealDay || feeds.length === 0) return { state: 'wait', stateReason: 'No meal today' }
+  if (fluidsFirst) return { state: 'feed', stateReason: `Fluids only until ${feeds[0]!.localTime}; then only at ${warmTo} or more` }
   return { state: 'feed', stateReason: `Only at ${warmTo} or more` }
 }
 
@@ -215,13 +218,13 @@ function sayWhatBinds(context: PlanContext, bounds: Map<string, { day: number, c
   if (unmeasured) {
     context.findings.push(makeFinding('meal.cannotBeMeasured', 'stop', 'Too small to measure', `The meal it needs may be at most ${formatVolumeMl(meals.firstCapMl)}; your syringes measure ${formatVolumeMl(meals.smallestMeasurableMl)} and more. No amount is planned. A finer syringe may help; otherwise a vet must choose how to feed it.`, { expected: meals.smallestMeasurableMl, received: meals.firstCapMl, unit: 'mL', path: 'syringes', sourceKey: 'house-rule' }))
   }
-  for (const one of bounds.values()) {
+  for (const one of [...bounds.values()].sort((a, b) => a.given / a.target - b.given / b.target)) {
     const when = formatDay(dateOf(one.day))
     for (const sentence of boundSentences(one.bounds, one.capMl)) {
       const short = sentence.startsWith('Meals stay')
       const code = short ? 'meal.capBinds' : sentence.startsWith('Even') ? 'fluids.feedOverCap' : sentence.startsWith('Fed less') ? 'meal.fewerFeeds' : 'meal.thinned'
       if (context.findings.some(finding => finding.code === code)) continue
-      const reached = short ? ` From ${when} meals reach ${formatPercent(one.given / one.target)} of what is wanted.` : ''
+      const reached = short ? ` On ${when} meals reach ${formatPercent(one.given / one.target)} of what is wanted.` : ''
       context.findings.push(makeFinding(code, short || code === 'fluids.feedOverCap' ? 'caution' : 'note', short ? 'It cannot eat enough this way' : code === 'fluids.feedOverCap' ? 'Much water in the feed' : code === 'meal.fewerFeeds' ? 'Fed less often' : 'Mix thinned to be measurable', sentence + reached, { ...(short ? { expected: one.target, received: one.given, unit: 'kcal/day' } : {}), sourceKey: 'house-rule' }))
     }
   }
@@ -233,10 +236,8 @@ function sayRounding(context: PlanContext, days: readonly PlanDay[]): void {
   let loose: { day: PlanDay, feed: PlanFeed } | null = null
   for (const day of days) {
     const feed = day.feeds[0]
-    // What a limit cut off is named as such, not as rounding.
     if (!feed) continue
-    const cut = context.findings.some(one => one.code === 'meal.capBinds') && day.energyGivenKcal < day.energyTargetKcal * (1 - roundingCaution.value)
-    if (!cut && (!worst || Math.abs(feed.roundingFraction) > Math.abs(worst.feed.roundingFraction))) worst = { day, feed }
+    if (!worst || Math.abs(feed.roundingFraction) > Math.abs(worst.feed.roundingFraction)) worst = { day, feed }
     if (!loose || feed.toleranceFraction > loose.feed.toleranceFraction) loose = { day, feed }
   }
   if (worst && Math.abs(worst.feed.roundingFraction) > roundingNotice.value) {

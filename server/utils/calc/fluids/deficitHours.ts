@@ -22,5 +22,7 @@ export function deficitHours(input: { deficitMl: number, groupHours: number, mai
   const room = checkedNumber(input.capMlPerDay, 'the limit', 'mL/day', Number.MIN_VALUE) - checkedNumber(input.maintenanceMlPerDay, 'maintenance', 'mL/day', 0)
   if (deficit === 0) return group
   if (room <= 0) return longest
-  return Math.min(longest, Math.max(group, deficit / room * 24))
+  const hours = deficit / room * 24
+  // A deficit that just fits must not become 24.000000000000004 h.
+  return hours <= group * (1 + 1e-9) ? group : Math.min(longest, hours)
 }
