@@ -1,11 +1,11 @@
-import type { FoodItem, ReferenceList } from '#shared/types/reference'
+import { answerList } from '#server/utils/http/answerList'
 import { limitRequests } from '#server/utils/http/limitRequests'
 import { currentEdition } from '#server/utils/reference'
 
-defineRouteMeta({ openAPI: { tags: ['Reference'], summary: 'Every feed of the list, with its energy, water and where each value comes from', responses: { 200: { description: '{ edition, items: FoodItem[] }' } } } })
+defineRouteMeta({ openAPI: { tags: ['Reference'], summary: 'Every feed of the list, with its energy, water and where each value comes from', parameters: [{ in: 'header', name: 'if-none-match', description: 'Tag of the list you have: 304 when it has not changed', schema: { type: 'string' } }], responses: { 200: { description: '{ edition, items: FoodItem[] }, with an ETag' }, 304: { description: 'You have this list already' } } } })
 
-export default defineEventHandler(async (event): Promise<ReferenceList<FoodItem>> => {
+export default defineEventHandler(async (event) => {
   await limitRequests(event, 'read', useRuntimeConfig(event).rateLimitFactor)
   const { id, foods } = currentEdition()
-  return { edition: id, items: [...foods.values()] }
+  return answerList(event, id, foods)
 })
