@@ -13,6 +13,26 @@ const SKIPS: Record<string, string> = {
   'measuring.isoClasses.underCapacityMl': 'row heading of the standard\'s table; its values are cited',
 }
 
+/** Sources that no number cites and that still carry something, each with what. */
+const UNCITED: Record<string, string> = {
+  'throckmorton1973': 'the measured lizard that tests/reference holds the reptile equations against',
+  'dibartola2012': 'published fluid sum worked out again in tests/reference',
+  'bartges1999': 'second witness of the K constants of birds, named in their locators',
+  'harper2000': 'says that equations from fasted birds are unsuitable: the reason for no more than resting at first',
+  'chappell1987': 'boas and pythons: agrees with the squamate equation, named in its notes',
+  'becklowe1994': 'beaded lizards: a steeper rise with warmth, why the temperature term is a caution',
+  'bennettnagy1977': 'free-living lizards at 2 to 2.5 times resting: the analogy behind the factor of 1.5',
+  'gienger2017': 'freshwater crocodiles and alligators lower than saltwater ones, named in the notes',
+  'mcnab2005': 'spread of marsupial rates, named in the notes',
+  'feldman2013': 'clade equations of snakes that exist and whose coefficients were not seen, named in the notes',
+  'feldman2016': 'where the lizard clade equations come from, named in their locators',
+  'dvmhospital': 'why illness factors are left out, named in the rules by what it says',
+  'wsava2017': 'top of the fluid range of birds, named in the rules by what it says',
+  'nice2006': 'days without food that the tiers are compared with, named in the rules',
+  'aspen2020': 'shape of the ramps: a third to a half at first',
+  'who2021': 'shape of the ramps: a third to a half at first',
+}
+
 /** Path of every number in a value, lists without their index, and whether it was made by `cited`. */
 function numbersIn(value: unknown, path: string[] = []): { path: string, isCited: boolean }[] {
   if (isCited(value)) return [{ path: path.join('.'), isCited: true }]
@@ -93,7 +113,28 @@ describe('bibliography', () => {
     expect(written.length).toBeGreaterThan(50)
     expect(written.filter(({ key }) => !sources.has(key)).map(({ path, key }) => `${path}: ${key}`)).toEqual([])
   })
+
+  const cited = new Set([...keysIn([...equations.values()]), ...keysIn([...species.values()]), ...keysIn([...foods.values()]), ...keysIn(rules), ...keysInCode()])
+  it('holds no source that nothing rests on', () => {
+    expect([...sources.keys()].filter(key => !cited.has(key) && !(key in UNCITED))).toEqual([])
+  })
+  it('keeps its list of uncited sources honest', () => {
+    expect(checkSkips(UNCITED, [...sources.keys()].filter(key => !cited.has(key)))).toEqual([])
+  })
 })
+
+/** Every `sourceKey` in a value, at any depth. */
+function keysIn(value: unknown): string[] {
+  if (Array.isArray(value)) return value.flatMap(keysIn)
+  if (typeof value !== 'object' || value === null) return []
+  return Object.entries(value).flatMap(([name, inner]) => name === 'sourceKey' && typeof inner === 'string' ? [inner] : keysIn(inner))
+}
+
+/** Keys that code or a note writes out, the bibliography itself left aside. */
+function keysInCode(): string[] {
+  const text = filesUnder('server/utils', ['.ts']).filter(path => path !== 'server/utils/reference/sources.ts').map(textOf).join('\n')
+  return [...sources.keys()].filter(key => new RegExp(`(?<![\\w-])${key}(?![\\w-])`).test(text))
+}
 
 it('lets nothing but record.ts make a cited number', () => {
   const forged = filesUnder('server', ['.ts']).filter(path => path !== 'server/utils/reference/record.ts' && /\bas (unknown as )?Cited(Range)?\b|<Cited(Range)?>\{/.test(textOf(path)))
