@@ -16,8 +16,11 @@ function capital(text: string) {
   return text.charAt(0).toUpperCase() + text.slice(1)
 }
 
+// Control characters, and those that turn the direction of writing: on a sheet they could reorder an amount beside a name.
+const UNSEEN = /[\p{Cc}\u200E\u200F\u202A-\u202E\u2066-\u2069]+/gu
+
 const text = (what: string, most: number) =>
-  z.string({ error: `${capital(what)} must be text.` }).trim().max(most, `${capital(what)} can have at most ${most} characters.`)
+  z.string({ error: `${capital(what)} must be text.` }).overwrite(value => value.replace(UNSEEN, ' ')).trim().max(most, `${capital(what)} can have at most ${most} characters.`)
 
 const CalendarDate = z.string({ error: 'Give the date as YYYY-MM-DD, for example 2026-12-03.' }).refine((value) => {
   const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(value)
@@ -28,7 +31,8 @@ const CalendarDate = z.string({ error: 'Give the date as YYYY-MM-DD, for example
 
 const Instant = z.string({ error: 'Give the start as a date and time with its offset, for example 2026-12-03T18:00:00Z.' }).refine((value) => {
   const match = /^(\d{4}-\d{2}-\d{2})T\d{2}:\d{2}(:\d{2}(\.\d{1,3})?)?(Z|[+-]\d{2}:\d{2})$/.exec(value)
-  return match !== null && CalendarDate.safeParse(match[1]).success && !Number.isNaN(Date.parse(value))
+  // Time zones are only known for our own times.
+  return match !== null && value >= '2000' && value < '2101' && CalendarDate.safeParse(match[1]).success && !Number.isNaN(Date.parse(value))
 }, 'The start must be a date and time that exists, with its offset, for example 2026-12-03T18:00:00Z.')
 
 const ClockTime = z.string({ error: 'Give a clock time as HH:MM, for example 07:30.' })
@@ -83,7 +87,7 @@ export const AnimalInput = z.object({
   bodyTemperatureC: number('the body temperature', 'deg C', 0, 50).optional(),
   daysUnfed: number('the days without a proper meal', 'days', 0, 730),
   lifeStage: z.enum(LIFE_STAGES, { error: `Choose one: ${LIFE_STAGES.join(', ')}.` }),
-  signs: z.array(z.enum(SIGN_IDS, { error: `Signs are named: ${SIGN_IDS.join(', ')}.` }), { error: 'Signs must be a list.' }).max(SIGN_IDS.length, 'A sign is listed twice.'),
+  signs: z.array(z.enum(SIGN_IDS, { error: `Signs are named: ${SIGN_IDS.join(', ')}.` }), { error: 'Signs must be a list.' }).refine(signs => new Set(signs).size === signs.length, 'A sign is listed twice.'),
 })
 
 export const ContactInput = z.object({

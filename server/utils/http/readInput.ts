@@ -32,7 +32,7 @@ export function readParamsOf<Schema extends z.ZodType>(event: H3Event, schema: S
 function checked<Schema extends z.ZodType>(schema: Schema, value: unknown): z.output<Schema> {
   const result = schema.safeParse(value)
   if (result.success) return result.data
-  const issues = issuesOf(result.error)
+  const issues = issuesOf(result.error, value)
   const first = issues[0]!
   throw fail({ status: 400, code: 'input.invalid', message: issues.length === 1 ? first.message : `${issues.length} fields need another look. First: ${first.message}`, issues })
 }
