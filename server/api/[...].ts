@@ -1,3 +1,4 @@
+/// <reference path="../virtual.d.ts" />
 import { handlersMeta } from '#nitro-internal-virtual/server-handlers-meta'
 import { fail } from '#server/utils/http/fail'
 import { methodsAt } from '#server/utils/http/methodsAt'
