@@ -1,3 +1,5 @@
+// The screens' own type check reads routes too, and finds no declaration by itself.
+// eslint-disable-next-line @typescript-eslint/triple-slash-reference
 /// <reference path="../virtual.d.ts" />
 import { handlersMeta } from '#nitro-internal-virtual/server-handlers-meta'
 import { fail } from '#server/utils/http/fail'
