@@ -124,9 +124,15 @@ function dayOf(instantMs: number, offsets: readonly ZoneOffset[]): number {
   return Math.floor(localOfInstantMs(instantMs, offsets) / DAY_MS)
 }
 
-/** YYYY-MM-DD of a day number. */
+/** YYYY-MM-DD of a day number (days since 1970-01-01). */
 export function dateOf(day: number): string {
   return new Date(day * DAY_MS).toISOString().slice(0, 10)
+}
+
+/** HH:MM of a wall-clock time written as if it were UTC. Arithmetic: a Date for each feed would cost more than its plan. */
+function clockOf(localMs: number): string {
+  const minute = Math.floor(localMs / 60_000) % 1440
+  return `${String(Math.floor(minute / 60)).padStart(2, '0')}:${String(minute % 60).padStart(2, '0')}`
 }
 
 function firstFeedingDay(context: PlanContext, feeds: number, firstDay: number, feedFromMs: number, slotsOn: (day: number, feeds: number) => number[]): { day: number, partial: boolean } {
@@ -166,7 +172,7 @@ function feedsOf(context: PlanContext, meal: ChosenMeal, slots: readonly number[
   const toleranceMl = measured.draws * isoToleranceMl({ capacityMl: measured.syringe.capacityMl, volumeMl: measured.markMl }, isoClassesOf(context))
   return slots.map(at => ({
     at: new Date(at).toISOString(),
-    localTime: new Date(localOfInstantMs(at, offsets)).toISOString().slice(11, 16),
+    localTime: clockOf(localOfInstantMs(at, offsets)),
     volumeMl: measured.volumeMl,
     markMl: measured.markMl,
     draws: measured.draws,
