@@ -12,6 +12,10 @@ const RULES: { folder: string, may: string[], notPackages: RegExp, sentence: str
   { folder: 'server/utils/data', may: ['server/utils/data', 'server/db', 'shared'], notPackages: /^(?!(drizzle-orm.*|node:.*|better-sqlite3)$)/, sentence: 'data/ imports db/ and shared/.' },
   { folder: 'server/utils/access', may: ['server/utils/access', 'server/utils/data', 'server/utils/http', 'shared'], notPackages: /^(?!(h3|node:.*)$)/, sentence: 'access/ imports data/, http/, shared/ and h3.' },
   { folder: 'server/utils/http', may: ['server/utils/http', 'server/utils/calc/calcInputError', 'shared'], notPackages: /^(?!(h3|zod|node:.*|rate-limiter-flexible|nitropack.*)$)/, sentence: 'http/ imports shared/ and h3.' },
+  { folder: 'server/utils/regimen', may: ['server/utils/regimen', 'server/utils/plan', 'server/utils/reference', 'server/utils/print', 'server/utils/data', 'server/utils/http', 'shared'], notPackages: /^(?!h3$)/, sentence: 'regimen/ joins plan/, print/ and data/ for the routes of plans, and computes nothing.' },
+  { folder: 'server/middleware', may: ['server/middleware', 'server/utils/access', 'server/utils/http', 'shared'], notPackages: /^(?!h3$)/, sentence: 'middleware/ imports access/ and http/ only.' },
+  { folder: 'server/plugins', may: ['server/plugins', 'server/db'], notPackages: /^(?!(node:.*|nitropack\/runtime)$)/, sentence: 'plugins/ open, migrate and check the database; nothing else.' },
+  { folder: 'server/db', may: ['server/db', 'server/utils/access/linkKey', 'server/utils/data/regimenRows', 'server/utils/plan/buildPlan', 'server/utils/reference', 'shared'], notPackages: /^(?!(drizzle-orm.*|better-sqlite3|node:.*)$)/, sentence: 'db/ is below everything; only the seed asks for a plan.' },
   { folder: 'server/api', may: ['server/utils', 'shared'], notPackages: /^(drizzle-orm|better-sqlite3)/, sentence: 'Routes import server/utils and shared/, never server/db.' },
   ...['pages', 'components', 'composables', 'stores', 'utils', 'layouts'].map(folder => ({ folder, may: ['pages', 'components', 'composables', 'stores', 'utils', 'shared', 'assets'], notPackages: /^(drizzle-orm|better-sqlite3|mathjs|pdfkit|h3|node:)/, sentence: 'The browser imports nothing from server/, types included.' })),
   { folder: 'components/ui', may: ['components/ui', 'utils', 'shared'], notPackages: /^(pinia)/, sentence: 'components/ui know no domain: they import utils/ and shared/.' },
@@ -24,7 +28,7 @@ const SKIPS: Record<string, string> = {
 }
 
 function importsOf(path: string): string[] {
-  const patterns = [/\bfrom\s+['"]([^'"\n]+)['"]/g, /(?:^|\n)\s*import\s+['"]([^'"\n]+)['"]/g, /\bimport\(\s*['"]([^'"\n]+)['"]\s*\)/g]
+  const patterns = [/(?:^|\n)\s*(?:import|export)\b[^'"`;=]*?\bfrom\s+['"]([^'"\n]+)['"]/g, /(?:^|\n)\s*import\s+['"]([^'"\n]+)['"]/g, /\bimport\(\s*['"]([^'"\n]+)['"]\s*\)/g]
   const code = textOf(path).replace(/\/\*[\s\S]*?\*\//g, '')
   return patterns.flatMap(pattern => [...code.matchAll(pattern)].map(match => match[1]!))
 }

@@ -28,6 +28,8 @@ describe('every route', () => {
   })
   it.each(routes)('%s is described in the OpenAPI document', path => expect(textOf(path)).toContain('defineRouteMeta('))
   it.each(routes.filter(path => /\.(post|put|patch)\.ts$/.test(path)))('%s reads its body through a schema', path => expect(textOf(path)).toContain('readBodyOf('))
+  it.each(routes.filter(path => path.includes('[') && !path.includes('[...]')))('%s reads the parts of its address through a schema', path => expect(textOf(path)).toContain('readParamsOf('))
+  it.each(routes.filter(path => /\.(post|put|patch)\.ts$/.test(path)))('%s counts how often it is asked', path => expect(textOf(path)).toContain('limitRequests('))
   it.each(routes)('%s does not read input around the schemas', (path) => {
     expect(textOf(path)).not.toMatch(/\b(readBody|getQuery|getRouterParam|getRouterParams|readRawBody|readFormData)\(/)
   })

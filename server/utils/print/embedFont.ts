@@ -59,7 +59,6 @@ export class LettersInUse {
       Subtype: 'CIDFontType2',
       BaseFont: name,
       // pdfkit writes a String object as a PDF string and a plain one as a name.
-      // eslint-disable-next-line no-new-wrappers -- see above
       CIDSystemInfo: { Registry: new String('Adobe'), Ordering: new String('Identity'), Supplement: 0 },
       FontDescriptor: descriptor,
       W: [0, this.glyphs.map(glyph => font.advance(glyph) * scale)],

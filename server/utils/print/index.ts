@@ -9,9 +9,6 @@ import { mixingCardModel } from './mixingCard'
 import type { PrintOptions } from './options'
 import { sheetModel } from './sheet'
 
-export { SheetRefusedError } from './options'
-export type { PrintContact, PrintOptions, PrintReference } from './options'
-
 /**
  * The sheet for the enclosure: days of a plan with rows to write in, or a full-page DO NOT FEED.
  * @throws SheetRefusedError when something a carer needs is missing.

@@ -2,8 +2,8 @@ import { getRequestURL, setResponseHeader, type H3Event } from 'h3'
 import type { RegimenInput, SheetQuery } from '#shared/schemas/regimen'
 import type { Plan, SavedRegimen } from '#shared/types/plan'
 import { fail } from '../http/fail'
-import { labelPdf, mixingPdf, SheetRefusedError, sheetPdf } from '../print'
-import type { PrintOptions } from '../print/options'
+import { labelPdf, mixingPdf, sheetPdf } from '../print'
+import { SheetRefusedError, type PrintOptions } from '../print/options'
 
 const PAPERS_OF = { sheet: sheetPdf, mixing: mixingPdf, label: labelPdf } as const
 export type PdfKind = keyof typeof PAPERS_OF

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { baseUrl } from '../server'
-import { ask, expectOurShape } from './client'
+import { ask, expectOurShape, juniper, rowCounts } from './client'
 
 interface OpenApi { info: { title: string, version: string }, paths: Record<string, Record<string, { summary?: string, responses?: Record<string, { description?: string }>, requestBody?: { description?: string } }>> }
 
@@ -74,5 +74,14 @@ describe('headers', () => {
     const answer = await fetch(baseUrl() + file, { headers: { 'accept-encoding': 'gzip' } })
     expect(answer.headers.get('content-encoding')).toBe('gzip')
     expect(answer.headers.get('cache-control')).toContain('immutable')
+  })
+})
+
+describe('a request that a page of another site makes', () => {
+  it('saves nothing', async () => {
+    const before = rowCounts()
+    expectOurShape(await ask('POST', '/api/regimens', juniper(), { 'sec-fetch-site': 'cross-site' }), 403, 'request.otherSite')
+    expect(rowCounts()).toEqual(before)
+    expect((await ask('POST', '/api/regimens/preview', juniper(), { 'sec-fetch-site': 'same-origin' })).status).toBe(200)
   })
 })

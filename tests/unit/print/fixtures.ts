@@ -1,5 +1,5 @@
 /** Plans written by hand, one for each thing that paper has to get right. No formula is run here. */
-import type { PrintOptions } from '../../../server/utils/print/index'
+import type { PrintOptions } from '../../../server/utils/print/options'
 import type { Plan, PlanDay, PlanFeed, PlanMixing, Syringe } from '#shared/types/plan'
 
 const ONE_ML: Syringe = { capacityMl: 1, stepMl: 0.01 }

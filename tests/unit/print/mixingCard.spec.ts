@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { SheetRefusedError } from '../../../server/utils/print/index'
+import { SheetRefusedError } from '../../../server/utils/print/options'
 import { mixingCardModel } from '../../../server/utils/print/mixingCard'
 import { plainTextOf } from '../../../server/utils/print/richText'
 import { beardedDragon, fromFirstDay, gecko, OPTIONS, potOf, shut, snake } from './fixtures'

@@ -1,6 +1,7 @@
 import { describe, expect, it } from 'vitest'
 import type { Plan } from '#shared/types/plan'
-import { SheetRefusedError, sheetPdf } from '../../../server/utils/print/index'
+import { sheetPdf } from '../../../server/utils/print/index'
+import { SheetRefusedError } from '../../../server/utils/print/options'
 import { missingFor } from '../../../server/utils/print/refusal'
 import { beardedDragon, dayOn, fromFirstDay, gecko, OPTIONS, shut, snake, sparrow } from './fixtures'
 
