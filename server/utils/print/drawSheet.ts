@@ -12,7 +12,7 @@ import { plain, strong } from './richText'
 import type { LogDay, Notice, SheetModel, StepBox, Stretch, StopBox } from './sheet'
 import { sheetFrame } from './sheetFrame'
 import { breakLines } from './shaping'
-import { held } from './wording'
+import { daySpan, held } from './wording'
 
 /** @returns the file. */
 export async function drawSheet(model: SheetModel, paper: Paper, info: DocumentInfo): Promise<Buffer> {
@@ -56,11 +56,16 @@ function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void, is
   const withBand = stack([stateBandBlock(stretch.band), amounts])
   const head = logHeadBlock(stretch)
   const spare = stack([spareRowBlock(stretch), gapBlock(BLOCK_GAP)])
-  const continued = continuedBlock(stretch)
-  const longest = flow.roomOn(flow.page + 1) - heightOf(continued, head, spare)
+  const continued = (from: LogDay) => continuedBlock(stretch, from)
+  const longest = flow.roomOn(flow.page + 1) - heightOf(continued(stretch.days[0]!), head, spare)
   const days = stretch.days.map(day => ({ day, block: dayBlock(stretch, day) }))
 
   const first = days[0]!
+  if (isUnderNotice && !flow.fits(amounts, head, first.block, spare)) {
+    // One blank row less is better than a first page without a row.
+    const shorter = dayBlock(stretch, { ...first.day, rows: first.day.rows.slice(1) })
+    if (flow.fits(amounts, head, shorter, spare)) first.block = shorter
+  }
   const beginning = first.block.height > longest ? splitBeginning(stretch, first.day) : first.block
   const lead = isUnderNotice && flow.fits(amounts, head, beginning, spare) ? amounts : withBand
   if (!flow.fits(lead, head, beginning, spare) && !flow.isFresh) turnPage()
@@ -73,7 +78,7 @@ function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void, is
       // The order alone stands on this page; its rows follow on the next.
       if (!flow.fits(head, needed, spare)) {
         turnPage()
-        flow.place(continued)
+        flow.place(continued(day))
       }
       flow.place(head)
       isOpen = true
@@ -81,10 +86,10 @@ function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void, is
     else if (!flow.fits(needed, spare)) {
       flow.place(spare)
       turnPage()
-      flow.place(continued)
+      flow.place(continued(day))
       flow.place(head)
     }
-    if (isLong) placeSplitDay(flow, stretch, day, [continued, head], spare)
+    if (isLong) placeSplitDay(flow, stretch, day, [continued(day), head], spare)
     else flow.place(block)
   }
   flow.place(spare)
@@ -117,12 +122,12 @@ function placeSplitDay(flow: PageFlow, stretch: Stretch, day: LogDay, again: rea
   })
 }
 
-/** The band again on a later page, with the amount where the days stood. */
-function continuedBlock(stretch: Stretch): Block {
+/** The band again on a later page: the days that are left, or the amount where there is one. */
+function continuedBlock(stretch: Stretch, from: LogDay): Block {
   const amounts = stretch.amounts.map(amount => `${amount.figure}\u00A0${amount.unit}`)
   return amounts.length > 0
     ? stateBandBlock({ ...stretch.band, reason: `${stretch.band.reason}. ${stretch.amounts[0]!.strength}, ${stretch.amounts[0]!.syringe}.` }, [strong(amounts.join(' or '))], 28)
-    : stateBandBlock(stretch.band)
+    : stateBandBlock({ ...stretch.band, days: daySpan(from.date, stretch.days.at(-1)!.date) })
 }
 
 /** Wait, and why: before anything else. Every reason has a box to tick once it is put right. */
@@ -172,17 +177,23 @@ function noticeBlock(notice: Notice): Block {
   }
 }
 
-/** Boxes in two columns: what to mix on the left, how to give it on the right. */
+/** Shares of the width that the left column may have. */
+const LEFT_SHARES = [0.5, 0.44, 0.38, 0.33]
+
+/** Boxes in two columns, what to mix on the left and how to give it on the right, as wide as makes them lowest. */
 export function boxesBlock(boxes: readonly StepBox[]): Block {
-  const width = (BOX_WIDTH - BLOCK_GAP * 2) / 2
-  const left = stack(boxes.slice(0, -1).map(box => stepBoxBlock(box, width, 0)))
-  const right = stepBoxBlock(boxes.at(-1)!, boxes.length === 1 ? BOX_WIDTH : width, boxes.length === 1 ? 0 : width + BLOCK_GAP * 2)
+  const [first, second] = boxes
+  if (!second) return stepBoxBlock(first!, BOX_WIDTH, 0)
+  const between = BLOCK_GAP * 2
+  const pairs = LEFT_SHARES.map((share) => {
+    const width = (BOX_WIDTH - between) * share
+    return [stepBoxBlock(first!, width, 0), stepBoxBlock(second, BOX_WIDTH - between - width, width + between)] as const
+  })
+  const heightOfPair = (pair: readonly Block[]) => Math.max(...pair.map(block => block.height))
+  const lowest = pairs.reduce((best, pair) => heightOfPair(pair) < heightOfPair(best) - 1 ? pair : best)
   return {
-    height: Math.max(left.height, right.height) + 4,
-    draw: (canvas, top) => {
-      left.draw(canvas, top + 2)
-      right.draw(canvas, top + 2)
-    },
+    height: heightOfPair(lowest) + 4,
+    draw: (canvas, top) => lowest.forEach(block => block.draw(canvas, top + 2)),
   }
 }
 

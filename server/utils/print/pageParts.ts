@@ -75,15 +75,22 @@ function nameLines(name: string, width: number) {
 function identifierBlock(identity: Identity, width: number): Block {
   const named = [identity.caseNumber && `Case ${identity.caseNumber}`, identity.enclosure].filter((text): text is string => Boolean(text))
   const missing = [...identity.caseNumber ? [] : ['Case'], ...identity.enclosure ? [] : ['Enclosure']]
-  const blocks: Block[] = named.length > 0 ? [paragraphBlock([strong(named.join(', '))], LARGE_SIZE, width)] : []
-  if (missing.length > 0) {
-    const each = width / missing.length
-    blocks.push({
-      height: WRITE_ROW,
-      draw: (canvas, top) => missing.forEach((label, index) => drawWriteIn(canvas, index * each, (index + 1) * each - 8, top + WRITE_ROW - 8, `${label}:`, '', LARGE_SIZE)),
-    })
+  const text = [strong(named.join(', '))]
+  const printed = paragraphBlock(text, LARGE_SIZE, width)
+  if (missing.length === 0) return printed
+  const lines = breakLines(text, width, LARGE_SIZE)
+  // A short one leaves room on its own row for the line of the other.
+  const shares = named.length > 0 && lines.length === 1 && lines[0]!.width < width / 2
+  const from = shares ? width / 2 : 0
+  const each = (width - from) / missing.length
+  const row: Block = {
+    height: WRITE_ROW,
+    draw: (canvas, top) => {
+      if (shares) canvas.text(0, top + WRITE_ROW - 8, named[0]!, { size: LARGE_SIZE, weight: 'bold' })
+      missing.forEach((label, index) => drawWriteIn(canvas, from + index * each, from + (index + 1) * each - 8, top + WRITE_ROW - 8, `${label}:`, '', LARGE_SIZE))
+    },
   }
-  return stack(blocks)
+  return shares || named.length === 0 ? row : stack([printed, row])
 }
 
 function supersededBlock(text: string): Block {

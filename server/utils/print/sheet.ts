@@ -198,7 +198,7 @@ export function waterOf(plan: Plan, day: PlanDay): LogDay['water'] {
   if (figure) return { label: day.feeds.length > 0 && day.state === 'feed' ? `Water on top of${NBSP}feeds:` : `Water to give in${NBSP}the${NBSP}day:`, figure }
   // Amphibians drink through the skin, so their plan names no volume.
   if (day.waterNeedMl === 0 && plan.fluids.maintenanceMlPerDay === 0) return { label: 'Soak given, for how long:', figure: null }
-  return { label: 'No water on top', figure: null }
+  return { label: day.waterToGiveMl > 0 ? 'Water: less than a drop' : 'No water on top', figure: null }
 }
 
 function boxesOf(plan: Plan, days: readonly PlanDay[]): StepBox[] {

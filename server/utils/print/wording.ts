@@ -174,9 +174,12 @@ export function noFoodBelow(animal: PlanAnimal): string {
   return `No food until ${where} at ${formatTemperatureC(low)} or more.`
 }
 
-/** Water to give in a day; null where none is due by volume. */
+/** About what one drop holds, mL: less than this nobody can give. */
+const DROP_ML = 0.05
+
+/** Water to give in a day, to two figures: it is given by and by, never to a mark. Null where none can be given by volume. */
 export function waterInFigures(day: PlanDay): string | null {
-  return day.waterToGiveMl > 0 ? `${formatSignificant(day.waterToGiveMl)}${NBSP}mL` : null
+  return day.waterToGiveMl >= DROP_ML ? `${formatSignificant(day.waterToGiveMl, 2)}${NBSP}mL` : null
 }
 
 export function discardInWords(pot: PlanMixing): string {

@@ -17,8 +17,8 @@ describe('a label', () => {
 
   it('says to wait, and how much water, on days before food', () => {
     expect(labelModel(fromFirstDay(), OPTIONS).strips.map(strip => [strip.band.word, strip.amounts.length, plainOf(strip.facts.at(-1)!)])).toEqual([
-      ['WAIT', 0, 'Water to give in the day: 5.45 mL.'],
-      ['WAIT', 0, 'Water to give in the day: 10.9 mL.'],
+      ['WAIT', 0, 'Water to give in the day: 5.5 mL.'],
+      ['WAIT', 0, 'Water to give in the day: 11 mL.'],
       ['FEED', 1, 'Water on top of feeds: 4.4 mL.'],
     ])
   })

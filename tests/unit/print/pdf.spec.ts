@@ -1,8 +1,10 @@
 import fc from 'fast-check'
+import { encode } from 'uqr'
 import { describe, expect, it } from 'vitest'
 import type { Plan } from '#shared/types/plan'
 import { formatVolumeMl, volumeInWords } from '#shared/utils/quantity'
-import { labelPdf, mixingPdf, sheetPdf, type PrintOptions } from '../../../server/utils/print/index'
+import { labelPdf, mixingPdf, sheetPdf } from '../../../server/utils/print/index'
+import type { PrintOptions } from '../../../server/utils/print/options'
 import { beardedDragon, dayOn, feedAt, fromFirstDay, gecko, longestNames, NAMES, OPTIONS, shut, snake, sparrow } from './fixtures'
 import { collisions, plainOf, readPdf, type ReadFile, type ReadPage } from './readPdf'
 
@@ -212,11 +214,20 @@ describe('the file', () => {
     expect((await printed(shut())).info).toMatchObject({ Title: 'Do not feed: Juniper' })
   })
 
-  it('has a square code only when the plan is saved', async () => {
-    const squares = (file: ReadFile) => file.pages[0]!.shapes.filter(shape => Math.abs(shape.right - shape.left - 25 * PT_PER_MM) < 0.1 && Math.abs(shape.bottom - shape.top - 25 * PT_PER_MM) < 0.1)
-    expect(squares(await printed(beardedDragon()))).toHaveLength(1)
+  it('has the square code of the link, whole and the right way round, only when the plan is saved', async () => {
+    const side = 25 * PT_PER_MM
+    const codes = (file: ReadFile) => file.pages.flatMap(page => page.shapes.filter(shape => shape.parts.length > 100 && Math.abs(shape.right - shape.left - side) < 0.1 && Math.abs(shape.bottom - shape.top - side) < 0.1))
+    const [code, ...more] = codes(await printed(beardedDragon()))
+    expect(more).toEqual([])
+    const { data, size } = encode(OPTIONS.reference!.url, { ecc: 'M', border: 0 })
+    const module = side / size
+    const seen = data.map((row, y) => row.map((_, x) => {
+      const [atX, atY] = [code!.left + (x + 0.5) * module, code!.top + (y + 0.5) * module]
+      return code!.parts.some(part => part.left < atX && atX < part.right && part.top < atY && atY < part.bottom)
+    }))
+    expect(seen).toEqual(data)
     const unsaved = await printed(beardedDragon(), { reference: null })
-    expect(squares(unsaved)).toHaveLength(0)
+    expect(codes(unsaved)).toEqual([])
     expect(unsaved.text).toContain('Not saved: this sheet has no code.')
   })
 })

@@ -3,6 +3,8 @@ import { getDocument, OPS } from 'pdfjs-dist/legacy/build/pdf.mjs'
 
 export interface Box { left: number, top: number, right: number, bottom: number }
 export interface PlacedText extends Box { text: string, size: number }
+/** A path with the closed parts it is made of. */
+export interface Shape extends Box { parts: Box[] }
 export interface ReadPage {
   width: number
   height: number
@@ -10,7 +12,7 @@ export interface ReadPage {
   /** All texts in the order they were written, one space between, in composed form. */
   text: string
   /** Around every line and box that was drawn. */
-  shapes: Box[]
+  shapes: Shape[]
 }
 export interface ReadFile { pages: ReadPage[], text: string, info: Record<string, unknown> }
 
@@ -41,9 +43,9 @@ export function plainOf(text: string): string {
 }
 
 /** Our pages turn the y axis once at the start; after that a path's corners are measured from the top. */
-async function shapesOf(page: { getOperatorList: () => Promise<{ fnArray: number[], argsArray: unknown[][] }> }): Promise<Box[]> {
+async function shapesOf(page: { getOperatorList: () => Promise<{ fnArray: number[], argsArray: unknown[][] }> }): Promise<Shape[]> {
   const { fnArray, argsArray } = await page.getOperatorList()
-  const boxes: Box[] = []
+  const boxes: Shape[] = []
   let thickness = 1
   fnArray.forEach((operator, index) => {
     const values = argsArray[index]!
@@ -54,9 +56,34 @@ async function shapesOf(page: { getOperatorList: () => Promise<{ fnArray: number
     // Lines end where they end: a level one is thick upwards and downwards only.
     const wide = top === bottom ? 0 : half
     const high = left === right ? 0 : half
-    boxes.push({ left: left! - wide, top: top! - high, right: right! + wide, bottom: bottom! + high })
+    boxes.push({ left: left! - wide, top: top! - high, right: right! + wide, bottom: bottom! + high, parts: partsOf([...(values[1] as Float32Array[])[0]!]) })
   })
   return boxes
+}
+
+const MOVE = 0
+const LINE = 1
+const CLOSE = 4
+
+/** Boxes around the closed parts of a path without curves. */
+function partsOf(path: number[]): Box[] {
+  const parts: Box[] = []
+  let corners: [number, number][] = []
+  for (let at = 0; at < path.length;) {
+    const step = path[at]
+    if (step === CLOSE) {
+      const xs = corners.map(([x]) => x)
+      const ys = corners.map(([, y]) => y)
+      parts.push({ left: Math.min(...xs), right: Math.max(...xs), top: Math.min(...ys), bottom: Math.max(...ys) })
+      at += 1
+      continue
+    }
+    if (step !== MOVE && step !== LINE) throw new Error(`A step of kind ${step} is not expected here.`)
+    if (step === MOVE) corners = []
+    corners.push([path[at + 1]!, path[at + 2]!])
+    at += 3
+  }
+  return parts
 }
 
 /** Texts that run into each other. */

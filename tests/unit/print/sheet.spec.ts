@@ -60,9 +60,9 @@ describe('a plan on paper', () => {
       [
         'FEED | Thu 3 Dec | Only at 28 °C or more',
         'One feed: at 18:00 | 70 mL | seventy millilitres | 60 mL syringe, draw up to 35 mL, 2 times for each feed | Half strength',
-        'Thu 3 Dec | Feeding day 1 | Weigh before the first feed: | Water on top of feeds: 14.2 mL | 18:00 70 mL 2 × 35 mL',
+        'Thu 3 Dec | Feeding day 1 | Weigh before the first feed: | Water on top of feeds: 14 mL | 18:00 70 mL 2 × 35 mL',
       ],
-      ['WAIT | Fri 4 to Wed 9 Dec | No meal today', ...['Fri 4', 'Sat 5', 'Sun 6', 'Mon 7', 'Tue 8', 'Wed 9'].map((day, index) => `${day} Dec | Feeding day ${index + 2} | Weigh at the same time each day: | Water to give in the day: 14.2 mL |`)],
+      ['WAIT | Fri 4 to Wed 9 Dec | No meal today', ...['Fri 4', 'Sat 5', 'Sun 6', 'Mon 7', 'Tue 8', 'Wed 9'].map((day, index) => `${day} Dec | Feeding day ${index + 2} | Weigh at the same time each day: | Water to give in the day: 14 mL |`)],
     ])
   })
 
@@ -70,7 +70,7 @@ describe('a plan on paper', () => {
     const model = sheetModel(fromFirstDay(), OPTIONS)
     expect(model.notice).toMatchObject({ state: 'wait', word: 'WAIT', reasons: [{ title: 'Body temperature not measured' }, { title: 'Fluids first' }] })
     expect(plain(model.notice!.warm.join(' '))).toBe('No food until its body is at 33 °C or more. Keep the warm end at 38–42 °C.')
-    expect(model.stretches.map(stretch => [stretch.band.word, stretch.amounts.length, ...stretch.days.map(day => plain(day.water.figure ?? '-'))])).toEqual([['WAIT', 0, '5.45 mL'], ['WAIT', 0, '10.9 mL'], ['FEED', 1, '4.4 mL']])
+    expect(model.stretches.map(stretch => [stretch.band.word, stretch.amounts.length, ...stretch.days.map(day => plain(day.water.figure ?? '-'))])).toEqual([['WAIT', 0, '5.5 mL'], ['WAIT', 0, '11 mL'], ['FEED', 1, '4.4 mL']])
     expect(model.stretches[1]!.days[0]!.rows).toHaveLength(3)
     expect(plain(model.dates)).toBe('Wednesday 2 to Friday 4 December, feeding day 2 of 11')
   })
@@ -114,6 +114,7 @@ describe('a plan on paper', () => {
     const day = dayOn('2026-12-03', { stage: 'fluids', state: 'wait', stateReason: 'Fluids only, no food yet', feedingDay: 0, waterNeedMl: 0, waterToGiveMl: 0 })
     expect(sheetModel({ ...plan, fluids: { ...plan.fluids, maintenanceMlPerDay: 0 }, days: [day] }, OPTIONS).stretches[0]!.days[0]!.water).toEqual({ label: 'Soak given, for how long:', figure: null })
     expect(sheetModel({ ...plan, days: [{ ...day, waterNeedMl: 1 }] }, OPTIONS).stretches[0]!.days[0]!.water).toEqual({ label: 'No water on top', figure: null })
+    expect(sheetModel({ ...plan, days: [{ ...day, waterNeedMl: 1, waterToGiveMl: 0.0321 }] }, OPTIONS).stretches[0]!.days[0]!.water).toEqual({ label: 'Water: less than a drop', figure: null })
   })
 })
 
