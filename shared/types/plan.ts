@@ -1,6 +1,6 @@
 /** The plan: what `POST /api/regimens/preview` answers, what is saved, and what is printed. */
 import type { Finding } from './finding'
-import type { Diet, EnergyBasis, EquationStep, Group, LengthMeasure, Range } from './reference'
+import type { Diet, EnergyBasis, EquationStep, Group, LengthMeasure, Provenance, Range } from './reference'
 
 export const GATE_STATES = ['feed', 'wait', 'do-not-feed'] as const
 export type GateState = (typeof GATE_STATES)[number]
@@ -141,7 +141,10 @@ export interface PlanMeal {
   smallestMeasurableMl: number
   /** What bound, in a sentence, and what would free it; empty when all fits. */
   binds: string[]
+  /** How the limits were worked out. */
   steps: EquationStep[]
+  /** How the first meal was worked out, from energy to the mark; empty without one. */
+  firstMealSteps: EquationStep[]
 }
 
 export interface PlanFeed {
@@ -257,6 +260,8 @@ export interface PlanAnimal {
   lengthMeasure: LengthMeasure | null
   feedingTemperatureC: Range & { what: 'body' | 'ambient' | 'water' }
   warmPlaceC: Range & { what: 'warm end' | 'air' | 'water' }
+  /** Where the species' own figures come from, by field, as the plan used them. */
+  origins: Record<string, Provenance>
 }
 
 export interface PlanFeedInfo {

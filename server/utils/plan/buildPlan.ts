@@ -80,6 +80,7 @@ export function buildPlan(input: RegimenInput, edition: Edition): Plan {
       smallestMeasurableMl: meals.smallestMeasurableMl,
       binds: planned.binds,
       steps: meals.steps,
+      firstMealSteps: planned.firstMealSteps,
     },
     days: planned.days,
     mixing,
@@ -90,6 +91,9 @@ export function buildPlan(input: RegimenInput, edition: Edition): Plan {
     findings: sorted([...gate.findings, ...context.findings]),
   }
 }
+
+/** Figures of the species that a plan shows, each with where it comes from. */
+const SHOWN_ORIGINS = ['adultWeightG', 'feedingTemperatureC', 'warmPlaceC', 'mealLimitMlPerKg', 'feedingIntervalHours', 'maintenanceMlPerKgPerDay']
 
 function sorted(findings: Finding[]): Finding[] {
   return findings.sort((a, b) => WEIGHT_OF_LEVEL[a.level] - WEIGHT_OF_LEVEL[b.level])
@@ -113,6 +117,7 @@ function animalOf(context: PlanContext, weighedOn: string): Plan['animal'] {
     lengthMeasure: animal.lengthMm === undefined ? null : animal.lengthMeasure ?? species.adultLengthMm?.measure ?? null,
     feedingTemperatureC: { low: species.feedingTemperatureC.low, high: species.feedingTemperatureC.high, what: species.feedingTemperatureC.what },
     warmPlaceC: { low: species.warmPlaceC.low, high: species.warmPlaceC.high, what: species.warmPlaceC.what },
+    origins: Object.fromEntries(SHOWN_ORIGINS.flatMap(field => species.provenance[field] ? [[field, species.provenance[field]]] : [])),
   }
 }
 

@@ -1,6 +1,7 @@
 import type { GateState, PlanDay, PlanEnergy, PlanFeed, PlanFluids, PlanStep } from '#shared/types/plan'
+import type { EquationStep } from '#shared/types/reference'
 import { formatDay } from '#shared/utils/calendar'
-import { formatNumber, formatPercent, formatVolumeMl, strengthInWords } from '#shared/utils/quantity'
+import { formatNumber, formatPercent, formatSignificant, formatVolumeMl, strengthInWords } from '#shared/utils/quantity'
 import type { ChosenMeal, MealBound } from '../calc/meals/chooseMeal'
 import { waterDueMl } from '../calc/fluids/waterDueMl'
 import { waterInFeedMl } from '../calc/fluids/waterInFeedMl'
@@ -28,6 +29,7 @@ export interface PlannedDays {
   firstMealMl: number | null
   largestMealMl: number | null
   binds: string[]
+  firstMealSteps: EquationStep[]
 }
 
 /**
@@ -116,8 +118,23 @@ export function planDays(context: PlanContext, outline: RampOutline, energy: Pla
     daysToFull: unmeasured || !fullDay ? null : days.indexOf(fullDay) + 1,
     firstMealMl: volumes[0] ?? null,
     largestMealMl: volumes.length > 0 ? Math.max(...volumes) : null,
+    firstMealSteps: firstMeal ? firstMealSteps(context, energy, outline.fractions[0]!, daysPerMeal, firstMeal) : [],
     binds: [...new Set([...bounds.values()].flatMap(one => boundSentences(one.bounds, one.capMl)))],
   }
+}
+
+/** From the energy of full meals to the mark on the syringe, step by step. */
+function firstMealSteps(context: PlanContext, energy: PlanEnergy, fraction: number, daysPerMeal: number, meal: ChosenMeal): EquationStep[] {
+  const density = context.feed.energyKcalPerMl * meal.strengthFraction
+  const wantedKcal = energy.targetKcalPerDay * fraction * daysPerMeal
+  const { measured } = meal
+  const written = (value: number) => formatSignificant(value)
+  return [
+    { label: `Energy of the first step: ${formatPercent(fraction)} of full meals${daysPerMeal > 1 ? `, for ${daysPerMeal} days at once` : ''} (house rule)`, expression: `${written(energy.targetKcalPerDay)} kcal × ${formatNumber(fraction)}${daysPerMeal > 1 ? ` × ${daysPerMeal}` : ''}`, value: wantedKcal, unit: 'kcal' },
+    { label: `Energy of the mix at ${strengthInWords(meal.strengthFraction)}`, expression: `${written(context.feed.energyKcalPerMl)} kcal/mL × ${formatNumber(meal.strengthFraction)}`, value: density, unit: 'kcal/mL' },
+    { label: `Volume of one feed, ${meal.feeds} a day`, expression: `${written(wantedKcal)} ÷ ${written(density)} ÷ ${meal.feeds}`, value: meal.wantedMl, unit: 'mL' },
+    { label: `Nearest mark of a ${formatNumber(measured.syringe.capacityMl)} mL syringe with marks of ${formatNumber(measured.syringe.stepMl, 3)} mL, never over the limit`, expression: `${written(meal.wantedMl)} mL rounded once`, value: measured.volumeMl, unit: 'mL' },
+  ]
 }
 
 function dayOf(instantMs: number, offsets: readonly ZoneOffset[]): number {

@@ -21,7 +21,7 @@ export function planValidity(context: PlanContext, tier: Tier, days: readonly Pl
   const weighedOn = weighedOnOf(context, days)
   const highRisk = tier === 'high' || tier === 'extreme'
   const catDog = context.species.id === 'sp-cat' || context.species.id === 'sp-dog'
-  const life = highRisk ? rules.validity.weightDays.highRisk : catDog && context.input.animal.lifeStage === 'adult' ? rules.validity.weightDays.adultCatDog : rules.validity.weightDays.exotic
+  const life = catDog && !highRisk && context.input.animal.lifeStage === 'adult' ? rules.validity.weightDays.adultCatDog : rules.validity.weightDays.usual
   const every = !context.ectotherm ? rules.validity.weighEveryDays.endotherm : highRisk ? rules.validity.weighEveryDays.ectothermHighRisk : rules.validity.weighEveryDays.ectotherm
   const goodUntil = addDays(weighedOn, life.value)
   const startDate = days[0]!.date

@@ -100,7 +100,7 @@ export interface Rules {
     densityNotice: Cited
   }
   validity: {
-    weightDays: { highRisk: Cited, exotic: Cited, adultCatDog: Cited }
+    weightDays: { usual: Cited, adultCatDog: Cited }
     weighEveryDays: { endotherm: Cited, ectothermHighRisk: Cited, ectotherm: Cited }
     stopLossFraction: Cited
     ownFeedBand: Cited

@@ -65,7 +65,7 @@ export function beardedDragon(changes: Partial<Plan> = {}): Plan {
     animal: {
       name: 'Juniper', caseNumber: 'TF-0412', enclosure: 'Warm room, tank 4', speciesId: 'inland-bearded-dragon', speciesName: 'Inland bearded dragon', scientificName: 'Pogona vitticeps',
       group: 'lizard', diet: 'omnivore', weightG: 182, weighedOn: '2026-12-02', lengthMm: 195, lengthMeasure: 'snout-vent',
-      feedingTemperatureC: { low: 33, high: 37, what: 'body' }, warmPlaceC: { low: 38, high: 42, what: 'warm end' },
+      feedingTemperatureC: { low: 33, high: 37, what: 'body' }, warmPlaceC: { low: 38, high: 42, what: 'warm end' }, origins: {},
     },
     feed: { feedId: 'demo-omnivore', name: 'Omnivore recovery mix', energyKcalPerMl: 1.2, waterFraction: 0.8, demo: false, sourceKey: 'label2026' },
     route: 'syringe',
@@ -75,7 +75,7 @@ export function beardedDragon(changes: Partial<Plan> = {}): Plan {
     condition: { expectedWeightG: 350, method: 'species-adult-weight', why: '', estimates: [{ method: 'species-adult-weight', label: '', expectedG: 350, lowG: 250, highG: 500, sourceKey: 'meiri2024' }], shortfallPercent: 48, shortfallLowPercent: 27, shortfallHighPercent: 64, scaledMassIndexG: null, relativeCondition: null, shellIndexGPerCm3: null, steps: [] },
     fluids: { maintenanceMlPerDay: 3.6, maintenanceMlPerKgPerDay: 20, drynessUsedPercent: 8, deficitMl: 14.6, deficitAsEnteredMl: 14.6, deficitHours: 48, capMlPerDay: 11, metabolicWaterMlPerKcal: 0.13, usualRoute: 'A shallow lukewarm soak and drops at the lips; under the skin or by tube only by a vet or under one.', steps: [], sourceKey: 'house-rule' },
     ramp: { tier: 'high', reasons: [], fractions: [0.2, 0.27, 0.34], steps: [], stepDays: 1, warmHours: 0, fluidHours: 24, startsAt: '2026-12-02T07:30:00Z', fluidsFrom: '2026-12-02T07:30:00Z', firstFeedAt: '2026-12-03T07:30:00Z', fullMealsOn: '2026-12-13', daysToFull: 12, sourceKey: 'nice2006' },
-    meal: { capMl: 3.6, firstCapMl: 1.8, firstCapMeals: 3, firstMealMl: 0.4, largestMealMl: 1.25, smallestMeasurableMl: 0.02, binds: [], steps: [] },
+    meal: { capMl: 3.6, firstCapMl: 1.8, firstCapMeals: 3, firstMealMl: 0.4, largestMealMl: 1.25, smallestMeasurableMl: 0.02, binds: [], steps: [], firstMealSteps: [] },
     days: [
       feedingDay('2026-12-03', 1, times, 0.4),
       feedingDay('2026-12-04', 2, times, 0.4, { waterToGiveMl: 4.4 }),

@@ -192,7 +192,7 @@ export const rules: Rules = {
     densityNotice: house(0.05, 'fraction', 'the rounded pot differs from the plan by more than this'),
   },
   validity: {
-    weightDays: { highRisk: house(3, 'days', 'high and extreme risk'), exotic: house(7, 'days', 'small exotics'), adultCatDog: house(30, 'days', 'stable adult dog or cat') },
+    weightDays: { usual: house(7, 'days', 'small exotics'), adultCatDog: house(30, 'days', 'stable adult dog or cat') },
     weighEveryDays: { endotherm: cited({ value: 1, unit: 'day', sourceKey: 'hrb2020', locator: 'p. 343: daily, same time, before feeding', howRead: 'restated' }), ectothermHighRisk: house(2, 'days', 'every 1 to 3 days early on'), ectotherm: house(7, 'days', 'weekly') },
     stopLossFraction: house(0.05, 'of body weight', 'stop and call under this'),
     ownFeedBand: house(0.1, 'fraction', 'a label\'s energy figure, either way'),
