@@ -95,7 +95,7 @@ function drawScale(canvas: Canvas, barrel: { capacityMl: number, stepMl: number 
 /** Fewest steps between two numbers that still leaves room for them; people count in ones, twos and fives. */
 function numberedEvery(canvas: Canvas, capacityMl: number, stepMl: number, stepWidth: number): number {
   const steps = Math.round(capacityMl / stepMl)
-  for (const every of [1, 2, 5, 10, 20, 25, 50, 100, 200]) {
+  for (const every of [1, 2, 4, 5, 10, 20, 25, 40, 50, 100, 200]) {
     if (every > steps) break
     if (steps % every !== 0) continue
     const widest = Math.max(...[every, steps].map(step => canvas.width(formatNumber(step * stepMl, 3), { size: NUMERAL_SIZE })))

@@ -167,7 +167,7 @@ describe('letters', () => {
       expect(pages.flatMap(collisions)).toEqual([])
       for (const page of pages) expect(page.text).toContain('0.05 mL')
     }), { numRuns: 25 })
-  })
+  }, 60_000)
 })
 
 describe('any plan of sane numbers', () => {
@@ -189,7 +189,7 @@ describe('any plan of sane numbers', () => {
       expect(pages.flatMap(collisions)).toEqual([])
       pages.forEach(expectInsideMargins)
     }), { numRuns: 25 })
-  })
+  }, 60_000)
 })
 
 describe('the file', () => {
