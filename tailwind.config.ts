@@ -14,6 +14,7 @@ export default {
       ink: { DEFAULT: tone('ink'), soft: tone('ink-soft') },
       rule: tone('rule'),
       moss: { DEFAULT: tone('moss'), tint: tone('moss-tint'), on: tone('moss-on') },
+      bar: { DEFAULT: tone('bar'), on: tone('bar-on') },
       food: { DEFAULT: tone('food'), fill: tone('food-fill'), tint: tone('food-tint') },
       water: { DEFAULT: tone('water'), fill: tone('water-fill'), tint: tone('water-tint') },
       dose: { DEFAULT: tone('dose'), fill: tone('dose-fill'), tint: tone('dose-tint') },

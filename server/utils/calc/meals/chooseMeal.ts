@@ -93,7 +93,18 @@ export function chooseMeal(
     measured = draw()
   }
   if (!measured) return null
-  // Thinning for the marks must not push the feeds over the day's water.
+  // Rounded up to a mark, a day that just fitted its water may not any more: one strength thicker does.
+  const drawnWaterMl = (meal: MeasuredFeed) => feeds * meal.volumeMl * (1 - input.strengths[at]! * (1 - input.waterFraction))
+  while (input.waterCapMl !== null && drawnWaterMl(measured) > input.waterCapMl && canThicken()) {
+    at += 1
+    const thicker = draw()
+    if (!thicker) {
+      at -= 1
+      break
+    }
+    measured = thicker
+    bounds.add('water-cap')
+  }
   if (overWater()) bounds.add('water-cap')
   const wantedMl = dayMl() / feeds
   if (wantedMl > capOfOne() * slack) bounds.add('short')
