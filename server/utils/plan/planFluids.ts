@@ -9,7 +9,7 @@ import { makeFinding } from './makeFinding'
 import type { PlanContext } from './planContext'
 
 const USUAL_ROUTE = {
-  reptile: 'A shallow lukewarm soak and drops at the lips; under the skin or by tube only by a vet or under one.',
+  reptile: 'A shallow lukewarm soak and drops at the lips; other ways only under a vet.',
   amphibian: 'Through the skin: a shallow soak in dechlorinated water, never by volume into the mouth.',
   bird: 'Drops along the beak, or by tube by someone trained; under the skin only by a vet or under one.',
   mammal: 'By mouth, or under the skin by a vet or under one.',

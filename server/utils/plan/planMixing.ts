@@ -75,7 +75,7 @@ function ratioWords(powderG: number | null, feedMl: number | null, waterMl: numb
   const parts = powderG ?? feedMl!
   const what = powderG !== null ? 'powder by weight' : 'feed'
   if (waterMl === 0) return 'as it is, no water added'
-  return `1 part ${what} to ${formatNumber(waterMl / parts, 1)} parts water`
+  return `1 part ${what} to ${formatNumber(waterMl / parts, 1)} parts water, so ${formatNumber(waterMl / parts + 1, 1)} parts in all`
 }
 
 function warmToC(context: PlanContext): Range {

@@ -28,6 +28,7 @@ export function howToGive(context: PlanContext): string[] {
   }
   if (input.route === 'tube') steps.push('Check the tube is where it should be.', 'Give slowly, over several minutes. Flush before and after.')
   if (input.route === 'hand') steps.push('Weigh what is offered and what is left over.', 'Take left-overs away within the hour.')
+  steps.push('Never more than the sheet says, even if it asks.')
   steps.push('Leave it quiet and warm with its head up for 20 minutes.')
   if (kind === 'reptile' && species.group !== 'snake') steps.push('A shallow dish of water in reach, never a deep one.')
   steps.push('Tick the sheet at once. Wash hands again.')
