@@ -3,7 +3,7 @@ import { encode } from 'uqr'
 import type { Canvas } from './canvas'
 
 /** Readers want this many empty modules around a code; whoever places it leaves them white. */
-export const QUIET_MODULES = 4
+const QUIET_MODULES = 4
 
 /**
  * Squares of one row that touch are one box: fewer shapes, and no hairlines between them on a cheap printer.
