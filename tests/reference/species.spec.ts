@@ -82,6 +82,19 @@ describe('weight from length (lizard data set)', () => {
   })
 })
 
+describe('warm places', () => {
+  // Chosen by hand for three that must not be wrong: a desert gecko, a gecko harmed above 28 deg C, a salamander harmed above 24 deg C.
+  it.each([
+    ['sp-leopard-gecko', { low: 32, high: 34.5, what: 'warm end' }],
+    ['sp-crested-gecko', { low: 22, high: 27 }],
+    ['sp-axolotl', { low: 14, high: 18, what: 'water' }],
+  ])('of %s', (id, warmPlace) => expect(byId.get(id)!.warmPlaceC).toMatchObject(warmPlace))
+
+  it('never lie under the temperature the animal is fed at', () => {
+    for (const one of species.filter(each => each.warmPlaceC.what !== 'air')) expect(one.warmPlaceC.low, one.id).toBeGreaterThanOrEqual(one.feedingTemperatureC.low)
+  })
+})
+
 describe('maintenance fluid', () => {
   // AAHA/AAFP 2013, maintenance tables: 5 kg cat 267 mL, 10 kg dog 742 mL a day.
   it.each([['sp-cat', 5000, 267], ['sp-dog', 10_000, 742]])('%s of %d g gets %d mL a day by its equation', (id, massG, mlPerDay) => {
