@@ -43,7 +43,7 @@ async function libraryBuilt() {
     configFile: false,
     logLevel: 'error',
     resolve: { alias: { '#shared': join(root, 'shared'), '#server': join(root, 'server') } },
-    build: { ssr: join(root, 'scripts', 'bench.entry.ts'), outDir: scratch, emptyOutDir: false, target: 'node20' },
+    build: { ssr: true, rollupOptions: { input: [join(root, 'scripts', 'bench.entry.ts'), join(root, 'scripts', 'bench.server.ts')] }, outDir: scratch, emptyOutDir: false, target: 'node20' },
     ssr: { external: ['pdfkit', 'fontkit', 'mathjs', 'zod', 'uqr'] },
   })
   // Packages are found from the project, not from the scratch folder.
@@ -76,24 +76,13 @@ function benchPlans({ buildPlan, currentEdition }) {
   return { medianMs: times[Math.floor(times.length / 2)].ms, slowestId: slowest.id, slowestMs: slowest.ms, species: times.length }
 }
 
-async function benchHttp({ buildPlan, currentEdition, RegimenInput }, input) {
-  const edition = currentEdition()
+async function benchHttp({ buildPlan, currentEdition }, input) {
   const body = JSON.stringify(input)
-  const answer = JSON.stringify(buildPlan(input, edition))
+  const answer = JSON.stringify(buildPlan(input, currentEdition()))
   const headers = { 'content-type': 'application/json' }
-  const whole = async (request) => {
-    const chunks = []
-    for await (const chunk of request) chunks.push(chunk)
-    return Buffer.concat(chunks).toString()
-  }
-  const bare = await listening(async (request, response) => {
-    await whole(request)
-    response.writeHead(200, headers).end(answer)
-  })
-  const computing = await listening(async (request, response) => {
-    const plan = buildPlan(RegimenInput.parse(JSON.parse(await whole(request))), edition)
-    response.writeHead(200, headers).end(JSON.stringify(plan))
-  })
+  // Each in a process of its own, as the application is: none shares its thread with the load generator.
+  const bare = await serverStarted({ BENCH_ANSWER: answer })
+  const computing = await serverStarted({})
   const app = await applicationStarted()
   try {
     const rate = async url => (await autocannon({ url, method: 'POST', headers, body, connections: 10, duration: 6 })).requests.average
@@ -107,32 +96,48 @@ async function benchHttp({ buildPlan, currentEdition, RegimenInput }, input) {
     await benchFirstPage(app.base)
   }
   finally {
-    bare.close()
-    computing.close()
+    bare.stop()
+    computing.stop()
     app.stop()
   }
 }
 
-function listening(handler) {
+function freePort() {
   return new Promise((resolve) => {
-    const server = createServer(handler).listen(0, '127.0.0.1', () => resolve({ url: `http://127.0.0.1:${server.address().port}/`, close: () => server.close() }))
+    const probe = createServer().listen(0, '127.0.0.1', () => {
+      const { port } = probe.address()
+      probe.close(() => resolve(String(port)))
+    })
   })
 }
 
-async function applicationStarted() {
-  const probe = await listening(() => {})
-  const port = new URL(probe.url).port
-  probe.close()
-  const child = spawn(process.execPath, [join(root, '.output', 'server', 'index.mjs')], { cwd: scratch, stdio: 'ignore', env: { ...process.env, PORT: port, HOST: '127.0.0.1', NUXT_DATA_DIR: join(scratch, 'data'), NODE_ENV: 'production', NUXT_RATE_LIMIT_FACTOR: '1000000' } })
-  const base = `http://127.0.0.1:${port}`
-  for (let tries = 0; tries < 100; tries += 1) {
+/** Waits until something answers there, well or not. */
+async function answering(url) {
+  for (let tries = 0; tries < 300; tries += 1) {
     try {
-      if ((await fetch(`${base}/api/health`)).ok) return { base, stop: () => child.kill('SIGTERM') }
+      await fetch(url)
+      return
     }
-    catch { /* not up yet */ }
-    await new Promise(resolve => setTimeout(resolve, 200))
+    catch { await new Promise(resolve => setTimeout(resolve, 200)) }
   }
-  throw new Error('The built server did not answer.')
+  throw new Error(`Nothing answered at ${url}.`)
+}
+
+/** The plain node:http server of bench.server.ts: the same bytes, or the same computing. */
+async function serverStarted(env) {
+  const port = await freePort()
+  const child = spawn(process.execPath, [join(scratch, 'bench.server.js')], { cwd: scratch, stdio: ['ignore', 'ignore', 'inherit'], env: { ...process.env, ...env, PORT: port } })
+  const url = `http://127.0.0.1:${port}/`
+  await answering(url)
+  return { url, stop: () => child.kill('SIGTERM') }
+}
+
+async function applicationStarted() {
+  const port = await freePort()
+  const child = spawn(process.execPath, [join(root, '.output', 'server', 'index.mjs')], { cwd: scratch, stdio: ['ignore', 'ignore', 'inherit'], env: { ...process.env, PORT: port, HOST: '127.0.0.1', NUXT_DATA_DIR: join(scratch, 'data'), NODE_ENV: 'production', NUXT_RATE_LIMIT_FACTOR: '1000000' } })
+  const base = `http://127.0.0.1:${port}`
+  await answering(`${base}/api/health`)
+  return { base, stop: () => child.kill('SIGTERM') }
 }
 
 /** What the first page makes a browser load at once: module scripts and what they import statically, and fonts of its CSS. */

@@ -11,7 +11,7 @@ import { linkOf } from '#server/utils/regimen/sendPdf'
 defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'Saves a plan with its input, result and edition', requestBody: { description: 'RegimenInput', content: { 'application/json': {} } }, responses: { 201: { description: '{ id, version, key, link }; the link works without an account for 30 days' }, 400: { description: 'A field is not as expected' }, 422: { description: 'Understood, but impossible' } } } })
 
 export default defineEventHandler(async (event): Promise<SavedRegimenReceipt> => {
-  await limitRequests(event, 'save', useRuntimeConfig(event).rateLimitFactor)
+  await limitRequests(event, 'save', useRuntimeConfig().rateLimitFactor)
   const input = await readBodyOf(event, RegimenInput)
   const plan = planOf(input)
   const now = new Date()

@@ -11,7 +11,8 @@ const limiters = new Map<string, RateLimiterMemory>()
 
 /**
  * Counts a request and refuses it when its address has made too many.
- * @param factor multiplies the limits; tests and benchmarks raise it.
+ * @param factor multiplies the limits; tests and benchmarks raise it. Routes read it from `useRuntimeConfig()` without the event:
+ *   with it, Nitro goes through the whole environment again for each request, which costs more than a plan.
  * @throws the error answer 429 `request.tooMany`, with Retry-After in seconds.
  */
 export async function limitRequests(event: H3Event, kind: Limited, factor: number): Promise<void> {

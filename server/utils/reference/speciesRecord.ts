@@ -54,7 +54,7 @@ export interface SharedFigures {
 }
 
 /** Windows around a normal body temperature, deg C; and how far the warm end lies above the feeding window. */
-export interface TemperatureRules { belowNormal: number, aboveNormal: number, birdsLowest: number, warmEndAbove: number }
+export interface TemperatureRules { belowNormal: number, aboveNormal: number, birdsLowest: number, warmEndAbove: number, warmEndHighest: number }
 
 /**
  * One species of the reference data, with where each of its values comes from, frozen.
@@ -164,8 +164,8 @@ function warmPlace(row: SpeciesRow, group: Group, feeding: SpeciesItem['feedingT
   }
   const house = (locator: string): Origin => ({ sourceKey: 'house-rule', locator, howRead: 'house-rule' })
   if (feeding.what === 'body') {
-    note('warmPlaceC', 'deg C', house(`top of the feeding window to ${rules.warmEndAbove} deg C above it`))
-    return { low: feeding.high, high: feeding.high + rules.warmEndAbove, what: 'warm end' }
+    note('warmPlaceC', 'deg C', house(`top of the feeding window to ${rules.warmEndAbove} deg C above it, never over ${rules.warmEndHighest}`))
+    return { low: feeding.high, high: Math.max(feeding.high, Math.min(feeding.high + rules.warmEndAbove, rules.warmEndHighest)), what: 'warm end' }
   }
   note('warmPlaceC', 'deg C', house('the feeding window itself'))
   return { low: feeding.low, high: feeding.high, what: feeding.what === 'water' ? 'water' : 'air' }

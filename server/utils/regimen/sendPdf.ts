@@ -34,7 +34,7 @@ function optionsOf(event: H3Event, { plan, input, saved }: Printed, query: Sheet
     reference: saved ? { id: saved.regimen.id, version: saved.regimen.version, latestVersion: saved.regimen.latestVersion, createdAt: saved.regimen.createdAt, url: linkOf(event, saved.regimen.id, saved.key) } : null,
     contacts: input.contacts ?? [],
     teamName: input.teamName,
-    appVersion: useRuntimeConfig(event).public.appVersion,
+    appVersion: useRuntimeConfig().public.appVersion,
     madeAt: new Date().toISOString(),
   }
 }

@@ -6,7 +6,7 @@ import { defineSpecies, type SharedFigures, type SpeciesRow } from '#server/util
 
 const { equations, sources, species: byId, rules } = currentEdition()
 const species = [...byId.values()]
-const temperatures = { belowNormal: 2, aboveNormal: 1.5, birdsLowest: 38, warmEndAbove: 2.5 }
+const temperatures = { belowNormal: 2, aboveNormal: 1.5, birdsLowest: 38, warmEndAbove: 2.5, warmEndHighest: 42 }
 const house = { sourceKey: 'house-rule', locator: 'a test', howRead: 'house-rule' } as const
 const shared: SharedFigures = {
   mealLimitMlPerKg: { value: { first: 10, later: 20, firstMeals: 3 }, origin: house },

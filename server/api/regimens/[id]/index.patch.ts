@@ -10,7 +10,7 @@ import { whenInZone } from '#server/utils/regimen/whenInZone'
 defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'A new version of a saved plan; the old one stays', parameters: [{ in: 'path', name: 'id', required: true }, { in: 'query', name: 'key' }], requestBody: { description: 'RegimenInput, and baseVersion: the version it was changed from', content: { 'application/json': {} } }, responses: { 200: { description: '{ id, version }' }, 403: { description: 'A plan of the demonstration' }, 404: { description: 'No such plan, wrong key, or the link has ended' }, 409: { description: 'Someone else saved a newer version meanwhile' }, 422: { description: 'Understood, but impossible' } } } })
 
 export default defineEventHandler(async (event) => {
-  await limitRequests(event, 'save', useRuntimeConfig(event).rateLimitFactor)
+  await limitRequests(event, 'save', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
   const row = await requireRegimen(event, id, readQueryOf(event, RegimenQuery).key, 'change')
   const { baseVersion, ...input } = await readBodyOf(event, RegimenChange)

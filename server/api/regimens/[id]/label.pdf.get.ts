@@ -8,7 +8,7 @@ import { versionOf } from '#server/utils/regimen/versionOf'
 defineRouteMeta({ openAPI: { tags: ['Paper'], summary: 'The label strip with the syringe of a saved plan, as PDF', parameters: [{ in: 'path', name: 'id', required: true }, { in: 'query', name: 'key' }, { in: 'query', name: 'version' }, { in: 'query', name: 'paper' }, { in: 'query', name: 'days' }], responses: { 200: { description: 'application/pdf; never recalculated' }, 404: { description: 'No such plan, wrong key, or the link has ended' }, 422: { description: 'It would lack something a carer needs: data.issues' } } } })
 
 export default defineEventHandler(async (event) => {
-  await limitRequests(event, 'print', useRuntimeConfig(event).rateLimitFactor)
+  await limitRequests(event, 'print', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
   const query = readQueryOf(event, SheetQuery)
   const row = await requireRegimen(event, id, query.key, 'look')

@@ -10,7 +10,7 @@ import { equationAnswer, queryNameOf } from '#server/utils/reference/equationAns
 defineRouteMeta({ openAPI: { tags: ['Reference'], summary: 'One equation worked out, with its working', parameters: [{ in: 'path', name: 'id', required: true, schema: { type: 'string' } }, { in: 'query', name: 'massG', description: 'Weight, g', schema: { type: 'number' } }, { in: 'query', name: 'temperatureC', description: 'Body temperature, deg C', schema: { type: 'number' } }, { in: 'query', name: 'state', description: '0 standard, 1 resting', schema: { type: 'number' } }, { in: 'query', name: 'lengthMm', description: 'Length, mm', schema: { type: 'number' } }, { in: 'query', name: 'referenceLengthMm', description: 'Reference length, mm', schema: { type: 'number' } }, { in: 'query', name: 'exponent', description: 'Exponent of weight on length', schema: { type: 'number' } }], responses: { 200: { description: 'EquationValue' }, 400: { description: 'A value is missing or not as expected: data.issues' }, 404: { description: 'No such equation' } } } })
 
 export default defineEventHandler(async (event): Promise<EquationValue> => {
-  await limitRequests(event, 'read', useRuntimeConfig(event).rateLimitFactor)
+  await limitRequests(event, 'read', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, EquationParams)
   const equation = currentEdition().equations.get(id)
   if (!equation) throw fail({ status: 404, code: 'equation.notFound', message: 'There is no equation of this name in the current reference data.' })

@@ -140,7 +140,7 @@ export const rules: Rules = {
       crocodilian: { count: house(1, 'meal an interval', 'one meal') },
       amphibian: { count: house(1, 'meal an interval', 'one meal every 24 to 72 h') },
       passerine: { everyHours: house(1, 'h', 'small songbirds need 30 to 60 minutes') },
-      birdWithCrop: { everyHours: cited({ value: 3.5, unit: 'h', sourceKey: 'hrb2020', locator: 'p. 361, emaciated eaglets every 3 to 4 h by day', howRead: 'restated' }) },
+      birdWithCrop: { everyHours: cited({ value: 3.5, unit: 'h', sourceKey: 'hrb2020', locator: 'scan page 361, emaciated eaglets every 3 to 4 h by day', howRead: 'restated' }) },
       birdWithoutCrop: { everyHours: house(3, 'h', '4 to 6 times a day') },
       smallMammal: { everyHours: house(2, 'h', 'under 100 g') },
       mammal: { everyHours: cited({ value: 4, unit: 'h', sourceKey: 'cbicu', locator: 'tube feeding every 4 to 6 h', howRead: 'restated' }) },
@@ -182,8 +182,8 @@ export const rules: Rules = {
     waterStepMl: { under10Ml: house(0.1, 'mL', 'measured with a syringe'), above: house(1, 'mL', 'measured with a large syringe') },
     discardHours: {
       room: cited({ value: 2, unit: 'h', sourceKey: 'memory', locator: 'blended feeds at room warmth', howRead: 'memory' }),
-      started: cited({ value: 1, unit: 'h', sourceKey: 'hrb2020', locator: 'p. 453, chick tube formula', howRead: 'restated' }),
-      fridge: cited({ value: 24, unit: 'h', sourceKey: 'hrb2020', locator: 'p. 222, chilled formula', howRead: 'restated' }),
+      started: cited({ value: 1, unit: 'h', sourceKey: 'hrb2020', locator: 'scan page 453, chick tube formula', howRead: 'restated' }),
+      fridge: cited({ value: 24, unit: 'h', sourceKey: 'hrb2020', locator: 'scan page 222, chilled formula', howRead: 'restated' }),
     },
     warmToC: {
       bird: [warmed(38), warmed(39)],
@@ -193,7 +193,7 @@ export const rules: Rules = {
   },
   validity: {
     weightDays: { usual: house(7, 'days', 'small exotics'), adultCatDog: house(30, 'days', 'stable adult dog or cat') },
-    weighEveryDays: { endotherm: cited({ value: 1, unit: 'day', sourceKey: 'hrb2020', locator: 'p. 343: daily, same time, before feeding', howRead: 'restated' }), ectothermHighRisk: house(2, 'days', 'every 1 to 3 days early on'), ectotherm: house(7, 'days', 'weekly') },
+    weighEveryDays: { endotherm: cited({ value: 1, unit: 'day', sourceKey: 'hrb2020', locator: 'scan page 343: daily, same time, before feeding', howRead: 'restated' }), ectothermHighRisk: house(2, 'days', 'every 1 to 3 days early on'), ectotherm: house(7, 'days', 'weekly') },
     stopLossFraction: house(0.05, 'of body weight', 'stop and call under this'),
     ownFeedBand: house(0.1, 'fraction', 'a label\'s energy figure, either way'),
   },

@@ -8,7 +8,7 @@ const restated = (sourceKey: string, locator: string, note?: string): Origin => 
 const from = <Value>(value: Value, origin: Origin): Sourced<Value> => ({ value, origin })
 
 /** House rules; the floor of 38 deg C for birds is the published gate of a seabird protocol, carried to all birds. */
-export const temperatureRules: TemperatureRules = { belowNormal: 2, aboveNormal: 1.5, birdsLowest: 38, warmEndAbove: 2.5 }
+export const temperatureRules: TemperatureRules = { belowNormal: 2, aboveNormal: 1.5, birdsLowest: 38, warmEndAbove: 2.5, warmEndHighest: 42 }
 
 const SMALL_G = 100
 const BATS = new Set(['sp-pipistrelle', 'sp-big-brown-bat', 'sp-noctule', 'sp-flying-fox'])
@@ -50,7 +50,7 @@ function mealLimit(row: SpeciesRow, group: Group): Sourced<SpeciesItem['mealLimi
       ? limit(10, 15, restated('cbicu', '5 to 10 mL/kg usually tolerated by tube', 'The 15 of later meals is from memory.'))
       : limit(10, 15, memory('rabbits, guinea pigs, chinchillas 10 to 15 mL/kg; ferrets and hedgehogs 5 to 10', 'Carried to other small and wild mammals.'))
     default: return row.hasCrop
-      ? limit(17, 25, restated('edubirds', 'crop about 50 mL/kg, begin at a third to half of it', 'A third at first is printed for emaciated eaglets (hrb2020, p. 361).'))
+      ? limit(17, 25, restated('edubirds', 'crop about 50 mL/kg, begin at a third to half of it', 'A third at first is printed for emaciated eaglets (hrb2020, scan page 361).'))
       : limit(10, 20, memory('birds without a crop 10 to 20 mL/kg'))
   }
 }
@@ -82,11 +82,11 @@ function gap(row: SpeciesRow, group: Group): Sourced<number> {
 
 function birdGap(row: SpeciesRow, group: Group, small: boolean): Sourced<number> {
   if (group === 'bird-passerine') return small || row.notInList ? from(0.5, house('small songbirds need 30 to 60 minutes')) : from(1, house('larger songbirds every hour'))
-  if (row.id === 'sp-swift') return from(0.5, restated('hrb2020', 'p. 516, every 30 to 60 minutes'))
-  if (row.id === 'sp-common-tern') return from(1.5, restated('hrb2020', 'p. 437, terns every 90 to 120 minutes'))
-  if (row.id === 'sp-herring-gull') return from(3, restated('hrb2020', 'p. 437, gulls every 3 to 4 h after the first week'))
+  if (row.id === 'sp-swift') return from(0.5, restated('hrb2020', 'scan page 516, every 30 to 60 minutes'))
+  if (row.id === 'sp-common-tern') return from(1.5, restated('hrb2020', 'scan page 437, terns every 90 to 120 minutes'))
+  if (row.id === 'sp-herring-gull') return from(3, restated('hrb2020', 'scan page 437, gulls every 3 to 4 h after the first week'))
   return row.hasCrop
-    ? from(3, restated('hrb2020', 'p. 361, emaciated eaglets every 3 to 4 h by day'))
+    ? from(3, restated('hrb2020', 'scan page 361, emaciated eaglets every 3 to 4 h by day'))
     : from(2, house('4 to 6 times a day'))
 }
 
