@@ -43,7 +43,7 @@ export function buildPlan(input: RegimenInput, edition: Edition): Plan {
   const planned = planDays(context, outline, energy, fluids, meals, closedReasonOf(context))
   const mixing = planMixing(context, planned.days)
   const uncertainty = planUncertainty(context, planned.days)
-  const validity = planValidity(context, outline.tier, planned.days)
+  const validity = planValidity(context, outline.tier, planned.days, gate)
   planCautions(context, condition, outline.tier, outline.reasons)
   return {
     edition: edition.id,

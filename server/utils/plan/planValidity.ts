@@ -1,4 +1,4 @@
-import type { PlanDay, PlanValidity, Tier } from '#shared/types/plan'
+import type { PlanDay, PlanGate, PlanValidity, Tier } from '#shared/types/plan'
 import { formatDay } from '#shared/utils/calendar'
 import { formatNumber, formatWeightG } from '#shared/utils/quantity'
 import { makeFinding } from './makeFinding'
@@ -11,12 +11,13 @@ import { dateOf } from './planDays'
  * @param context  the plan's context; findings are added.
  * @param tier  refeeding risk.
  * @param days  days of the plan.
+ * @param gate  a weight too old closes it to `wait`, with the reason.
  * @returns dates and the stop weight, g, rounded down to the scale's step and always under the weight.
  * @throws Never for a context that `planContext` made.
  * @source dosing sheet MET-02 (weight age), trade needs 6.4; house rules
- * @example planValidity(context, 'extreme', days).stopWeightG // 9.5 for a gecko of 10 g on a 0.1 g scale
+ * @example planValidity(context, 'extreme', days, gate).stopWeightG // 9.5 for a gecko of 10 g on a 0.1 g scale
  */
-export function planValidity(context: PlanContext, tier: Tier, days: readonly PlanDay[]): PlanValidity {
+export function planValidity(context: PlanContext, tier: Tier, days: readonly PlanDay[], gate: PlanGate): PlanValidity {
   const { rules, weightG } = context
   const weighedOn = weighedOnOf(context, days)
   const highRisk = tier === 'high' || tier === 'extreme'
@@ -29,7 +30,8 @@ export function planValidity(context: PlanContext, tier: Tier, days: readonly Pl
     context.findings.push(makeFinding('weight.fromTheFuture', 'caution', 'Weighed after the plan begins', `The weight is dated ${formatDay(weighedOn)}, the plan begins on ${formatDay(startDate)}. Check the dates.`, { path: 'animal.weighedOn', expected: startDate, received: weighedOn }))
   }
   else if (goodUntil < startDate) {
-    context.findings.push(makeFinding('weight.stale', 'stop', 'The weight is too old', `It was weighed on ${formatDay(weighedOn)}; a weight carries a plan like this for ${life.value} days. Weigh it again before the first feed.`, { path: 'animal.weighedOn', expected: `${life.value} days at most`, received: weighedOn, sourceKey: 'house-rule' }))
+    gate.findings.push(makeFinding('weight.stale', 'stop', 'The weight is too old', `It was weighed on ${formatDay(weighedOn)}; a weight carries a plan like this for ${life.value} days. Weigh it again before the first feed.`, { path: 'animal.weighedOn', expected: `${life.value} days at most`, received: weighedOn, sourceKey: 'house-rule' }))
+    if (gate.state === 'feed') gate.state = 'wait'
   }
   sayCoarseScale(context)
   const step = scaleStepG(context)

@@ -93,6 +93,14 @@ describe('the gate', () => {
     expect(one.gate).toEqual({ state: 'feed', findings: [] })
     expect(one.days[0]!.stage).toBe('ramp')
   })
+  it('waits when the weight is older than it may be', () => {
+    const old = plan({ animal: { weightG: 60, drynessPercent: 0, daysUnfed: 3, weighedOn: '2026-11-20' } })
+    expect(old.gate.state).toBe('wait')
+    expect(old.gate.findings.map(finding => finding.code)).toEqual(['weight.stale'])
+    const fresh = plan({ animal: { weightG: 60, drynessPercent: 0, daysUnfed: 3, weighedOn: '2026-11-25' } })
+    expect(fresh.gate.state).toBe('feed')
+    expect(fresh.validity.goodUntil).toBe('2026-12-02')
+  })
   it('closes every day behind a closing sign, and says why', () => {
     for (const day of plan({ animal: { signs: ['convulsing'] } }).days) expect(day).toMatchObject({ state: 'do-not-feed', stateReason: 'Fits, twitches or trembles' })
   })
