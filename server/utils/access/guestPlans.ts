@@ -11,7 +11,7 @@ declare module '#auth-utils' {
 /** Plans that this browser's sealed cookie remembers, newest first. */
 export async function guestPlansOf(event: H3Event): Promise<GuestPlan[]> {
   // Asking for a session makes one: a visitor who saved nothing gets no cookie.
-  if (!getCookie(event, useRuntimeConfig(event).session.name ?? 'nuxt-session')) return []
+  if (!getCookie(event, useRuntimeConfig().session.name ?? 'nuxt-session')) return []
   const session = await getUserSession(event)
   return session.secure?.plans ?? []
 }

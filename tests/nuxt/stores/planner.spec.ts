@@ -1,0 +1,140 @@
+import { registerEndpoint } from '@nuxt/test-utils/runtime'
+import { createError, readBody } from 'h3'
+import { createPinia, setActivePinia } from 'pinia'
+import { beforeEach, describe, expect, it } from 'vitest'
+import type { Plan, SavedRegimen } from '#shared/types/plan'
+import { usePlannerStore } from '~/stores/planner'
+import { emptyDraft, type PlannerDraft } from '~/utils/plannerDraft'
+import { regimenInput } from '../../unit/plan/inputs'
+
+/** What the server was asked, and what it answers next. Its plans are told apart by their weight alone. */
+interface Asked { animal: { weightG: number, name?: string }, baseVersion?: number }
+let asked: Asked[] = []
+let answer: (body: Asked) => unknown = planOf
+
+function planOf(body: Asked): unknown {
+  return { animal: { weightG: body.animal.weightG } }
+}
+const handle = (method: 'POST' | 'PATCH') => ({
+  method,
+  handler: async (event: Parameters<typeof readBody>[0]) => {
+    const body = await readBody<Asked>(event)
+    asked.push(body)
+    return await answer(body)
+  },
+})
+registerEndpoint('/api/regimens/preview', handle('POST'))
+registerEndpoint('/api/regimens', handle('POST'))
+registerEndpoint('/api/regimens/abc', handle('PATCH'))
+
+function filled(weight: string, change: Partial<PlannerDraft> = {}): PlannerDraft {
+  return { ...emptyDraft(), speciesId: 'sp-leopard-gecko', weight: { text: weight, unit: 'g' }, dryness: '8', daysUnfed: '30', startAt: '2026-12-02T09:00', timeZone: 'Europe/London', ...change }
+}
+const refuse = (statusCode: number, data: object) => () => {
+  throw createError({ statusCode, data })
+}
+
+let planner: ReturnType<typeof usePlannerStore>
+beforeEach(() => {
+  setActivePinia(createPinia())
+  planner = usePlannerStore()
+  asked = []
+  answer = planOf
+})
+
+describe('preview', () => {
+  it('asks for nothing while something is needed, and shows no plan of before', async () => {
+    planner.draft = filled('22')
+    await planner.preview()
+    expect(planner.plan?.animal.weightG).toBe(22)
+    planner.draft.weight.text = ''
+    await planner.preview()
+    expect(planner.plan).toBeNull()
+    expect(planner.needed).toEqual(['its weight'])
+    expect(asked).toHaveLength(1)
+  })
+
+  it('asks for nothing while a word stands for a number, and says where', async () => {
+    planner.draft = filled('22', { feedsPerDay: 'few' })
+    await planner.preview()
+    expect(asked).toHaveLength(0)
+    expect(planner.issueAt('feedsPerDay')).toBe('Type a number, for example 0.4.')
+    expect(planner.issueAt('animal.weightG')).toBeUndefined()
+  })
+
+  it('drops an answer that a newer question has overtaken', async () => {
+    let release = () => {}
+    const held = new Promise<void>(resolve => release = resolve)
+    answer = body => body.animal.weightG === 22 ? held.then(() => planOf(body)) : planOf(body)
+    planner.draft = filled('22')
+    const first = planner.preview()
+    planner.draft.weight.text = '23'
+    await planner.preview()
+    release()
+    await first
+    expect(planner.plan?.animal.weightG).toBe(23)
+    expect(planner.problem).toBeNull()
+    expect(planner.working).toBe(false)
+  })
+
+  it('shows each refused field at its place and keeps the last plan', async () => {
+    planner.draft = filled('22')
+    await planner.preview()
+    answer = refuse(422, { code: 'weight.implausible', message: 'Too heavy.', issues: [{ path: 'animal.weightG', message: 'Too heavy.' }] })
+    planner.draft.weight.text = '22000'
+    await planner.preview()
+    expect(planner.problem).toMatchObject({ code: 'weight.implausible', offline: false })
+    expect(planner.issueAt('animal.weightG')).toBe('Too heavy.')
+  })
+
+  it('is rid of a problem as soon as the plan can be worked out', async () => {
+    answer = refuse(422, { code: 'a.b', message: 'No.', issues: [{ path: 'startAt', message: 'No.' }] })
+    planner.draft = filled('22')
+    await planner.preview()
+    answer = planOf
+    await planner.preview()
+    expect(planner.problem).toBeNull()
+    expect(planner.issues).toEqual([])
+  })
+})
+
+describe('save', () => {
+  it('saves a new plan and says where it can be seen', async () => {
+    answer = () => ({ id: 'abc', version: 1, key: 'k/+=', link: '' })
+    planner.draft = filled('22')
+    expect(await planner.save()).toBe('/plans/abc?key=k%2F%2B%3D')
+    expect(asked[0]?.baseVersion).toBeUndefined()
+    expect(planner.saving).toBe(false)
+  })
+
+  it('saves a change on top of the version it was made from', async () => {
+    planner.change({ id: 'abc', version: 2, latestVersion: 2, input: regimenInput(), plan: {} as Plan } as SavedRegimen, 'key')
+    planner.draft.weight.text = '25'
+    answer = () => ({ id: 'abc', version: 3 })
+    expect(await planner.save()).toBe('/plans/abc?key=key')
+    expect(asked[0]).toMatchObject({ baseVersion: 2, animal: { weightG: 25 } })
+    expect(planner.editing).toBeNull()
+  })
+
+  it('that someone overtook loses nothing: the problem is said, and the change is still one', async () => {
+    planner.change({ id: 'abc', version: 2, latestVersion: 2, input: regimenInput(), plan: {} as Plan } as SavedRegimen, null)
+    answer = refuse(409, { code: 'regimen.changed', message: 'Version 3 was saved meanwhile.' })
+    expect(await planner.save()).toBeNull()
+    expect(planner.problem).toMatchObject({ code: 'regimen.changed' })
+    expect(planner.editing).toMatchObject({ id: 'abc', version: 2 })
+    expect(planner.draft.speciesId).toBe('sp-leopard-gecko')
+  })
+})
+
+describe('starting over', () => {
+  it('empties the form, and can be undone', () => {
+    planner.draft = filled('22', { name: 'Pebble' })
+    planner.startOver()
+    expect(planner.draft.name).toBe('')
+    expect(planner.draft.timeZone).not.toBe('')
+    planner.undo()
+    expect(planner.draft).toMatchObject({ name: 'Pebble', weight: { text: '22' } })
+    planner.undo()
+    expect(planner.draft.name).toBe('Pebble')
+  })
+})
