@@ -79,7 +79,7 @@ describe('findings', () => {
 describe('the table of days', () => {
   it('has a row for each day with the plan\'s own volumes and times', async () => {
     const table = await mountSuspended(PlanDayTable, { props: { plan } })
-    const rows = table.findAll('tbody tr')
+    const rows = table.findAll('tbody tr').filter(row => row.find('th[scope="row"]').exists())
     expect(rows).toHaveLength(Math.min(14, plan.days.length))
     rows.forEach((row, at) => {
       const day = plan.days[at]!
@@ -87,5 +87,14 @@ describe('the table of days', () => {
       if (day.feeds[0]) expect(row.text()).toContain(`${day.feeds.length} × ${formatVolumeMl(day.feeds[0].volumeMl)}`)
     })
     for (const head of table.findAll('thead th')) expect(head.attributes('scope')).toBe('col')
+  })
+
+  it('says from when the weight is too old, between the last day it holds and the next', async () => {
+    const table = await mountSuspended(PlanDayTable, { props: { plan } })
+    const at = plan.days.findIndex(day => day.date > plan.validity.goodUntil)
+    expect(at).toBeGreaterThan(0)
+    const rows = table.findAll('tbody tr')
+    expect(rows[at]!.text()).toContain('Weigh it and plan again')
+    expect(rows.filter(row => row.text().includes('Weigh it and plan again'))).toHaveLength(1)
   })
 })
