@@ -42,6 +42,17 @@ describe('the OpenAPI document', () => {
   })
 })
 
+describe('the shapes in the OpenAPI document', () => {
+  it('are the schemas that check what is sent', async () => {
+    const { json } = await ask<{ components: { schemas: Record<string, { required: string[], properties: Record<string, { properties?: Record<string, unknown> }> }> }, paths: Record<string, Record<string, { requestBody: { content: unknown } }>> }>('GET', '/_openapi.json')
+    const { RegimenInput, RegimenChange } = json.components.schemas
+    expect(RegimenInput!.required).toEqual(expect.arrayContaining(['animal', 'feed', 'route', 'feedingHours', 'startAt', 'timeZone']))
+    expect(Object.keys(RegimenInput!.properties.animal!.properties!)).toEqual(expect.arrayContaining(['speciesId', 'weightG', 'drynessPercent', 'signs']))
+    expect(RegimenChange!.properties).toHaveProperty('baseVersion')
+    expect(json.paths['/api/regimens/preview']!.post!.requestBody.content).toEqual({ 'application/json': { schema: { $ref: '#/components/schemas/RegimenInput' } } })
+  })
+})
+
 describe('headers', () => {
   it.each(['/', '/plans/abc?key=secret', '/api/health'])('of %s send no address on and let nobody guess a type', async (path) => {
     const { headers } = await fetch(baseUrl() + path, { headers: { accept: 'text/html' } })

@@ -80,9 +80,12 @@ describe('a stranger', () => {
   })
 
   it('opens a number and finds formula, values and source', async () => {
+    // The first meal: from energy to the mark. Then the energy itself.
     await page.getByText('How this was worked out').first().click()
-    await page.getByText('0.75').first().waitFor()
-    expect(await page.locator('article').innerText()).toMatch(/78 × 0\.29\d*\^0\.75/)
+    await page.getByText(/Nearest mark of a \d+ mL syringe/).waitFor()
+    await page.getByText('How this was worked out').nth(1).click()
+    await page.locator('article', { hasText: /78 × 0\.29\d*\^0\.75/ }).waitFor()
+    await page.getByRole('link', { name: /^Source: / }).first().waitFor()
   })
 
   it('finds the draft again after a reload', async () => {
