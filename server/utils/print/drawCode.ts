@@ -1,9 +1,6 @@
-/** The square code of a saved plan, as vector squares. */
+/** The square code of a saved plan, as vector squares. Readers want four empty modules around it; whoever places it leaves them white. */
 import { encode } from 'uqr'
 import type { Canvas } from './canvas'
-
-/** Readers want this many empty modules around a code; whoever places it leaves them white. */
-const QUIET_MODULES = 4
 
 /**
  * Squares of one row that touch are one box: fewer shapes, and no hairlines between them on a cheap printer.
