@@ -28,3 +28,9 @@ export async function requireRegimen(event: H3Event, id: string, key: string | u
 export function isOpen(row: Pick<RegimenRow, 'keyHash' | 'linkExpiresAt'>, key: string, now: Date): boolean {
   return keyFits(key, row.keyHash) && row.linkExpiresAt > now.toISOString()
 }
+
+/** Whether a key opens the plan of that id now; never so for the demonstration, which needs none. */
+export function opensRegimen(id: string, key: string): boolean {
+  const row = findRegimen(database(), id)
+  return row !== undefined && !row.demo && isOpen(row, key, new Date())
+}

@@ -174,6 +174,17 @@ describe('the list of a browser', () => {
     expect(list.text).not.toContain(second.key)
   })
 
+  it('holds a plan whose page was opened by its link, and none opened by a wrong one', async () => {
+    const { id, key } = await saved()
+    const page = await ask('GET', `/plans/${id}?key=${key}`, undefined, { accept: 'text/html' })
+    expect(page.text).toContain('Juniper')
+    const list = await ask<{ items: { id: string }[] }>('GET', '/api/regimens', undefined, { cookie: cookieOf(page) })
+    expect(list.json.items.map(item => item.id)).toEqual([id])
+    const shut = await ask('GET', `/plans/${id}?key=${'x'.repeat(43)}`, undefined, { accept: 'text/html' })
+    expect(shut.headers.getSetCookie().filter(line => line.startsWith('thimbleful='))).toEqual([])
+    expect(shut.text).not.toContain('Juniper')
+  })
+
   it('keeps the last 20 in a cookie that a browser still takes', async () => {
     let cookie = ''
     const ids: string[] = []

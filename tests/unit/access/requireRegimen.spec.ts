@@ -2,7 +2,7 @@ import type { H3Event } from 'h3'
 import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
 import { migrateDatabase } from '../../../server/db/migrate'
 import { newLinkKey } from '../../../server/utils/access/linkKey'
-import { isOpen, requireRegimen } from '../../../server/utils/access/requireRegimen'
+import { isOpen, opensRegimen, requireRegimen } from '../../../server/utils/access/requireRegimen'
 import { database, insertRegimen } from '../../../server/utils/data'
 import { buildPlan } from '../../../server/utils/plan/buildPlan'
 import { currentEdition } from '../../../server/utils/reference'
@@ -85,4 +85,8 @@ describe('isOpen', () => {
   it.each([['2026-12-31T11:59:59.999Z', true], ['2026-12-31T12:00:00.000Z', false], ['2026-12-31T12:00:00.001Z', false]])('at %s: %s', (now, open) => {
     expect(isOpen(row, pebble.key, new Date(now))).toBe(open)
   })
+})
+
+describe('opensRegimen', () => {
+  it.each<[string, string, boolean]>([['pebble', pebble.key, true], ['pebble', oak.key, false], ['old', old.key, false], ['nobody', pebble.key, false], ['demo', demo.key, false]])('%s', (id, key, opens) => expect(opensRegimen(id, key)).toBe(opens))
 })
