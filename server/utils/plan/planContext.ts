@@ -2,6 +2,7 @@ import type { RegimenInput } from '#shared/schemas/regimen'
 import type { Finding } from '#shared/types/finding'
 import type { SpeciesItem } from '#shared/types/reference'
 import { isEctotherm, kindOf, type Kind } from '#shared/utils/groups'
+import { formatNumber } from '#shared/utils/quantity'
 import { CalcInputError } from '../calc/calcInputError'
 import type { Edition } from '../reference'
 import type { Rules } from '../reference/rules'
@@ -62,11 +63,12 @@ export function planContext(input: RegimenInput, edition: Edition): PlanContext 
 function refuseImplausibleWeight(weightG: number, lifeStage: RegimenInput['animal']['lifeStage'], species: SpeciesItem, rules: Rules): void {
   const lowest = species.adultWeightG.low * rules.condition.plausibleLow.value
   const highest = species.adultWeightG.high * rules.condition.plausibleHigh.value
-  const range = `${species.adultWeightG.low} to ${species.adultWeightG.high} g`
+  const range = `${formatNumber(species.adultWeightG.low)} to ${formatNumber(species.adultWeightG.high)} g`
+  const typed = `${formatNumber(weightG, 3)} g`
   if (weightG > highest) {
-    throw new CalcInputError('weight.implausible', `${weightG} g is too heavy for this species (adults ${range}). Was the weight typed in another unit? Give it in grams.`, { path: 'animal.weightG', received: weightG, expected: range })
+    throw new CalcInputError('weight.implausible', `${typed} is too heavy for this species (adults ${range}). Was the weight typed in another unit? Give it in grams.`, { path: 'animal.weightG', received: weightG, expected: range })
   }
   if (lifeStage !== 'growing' && weightG < lowest) {
-    throw new CalcInputError('weight.implausible', `${weightG} g is too light for an adult of this species (adults ${range}). Was it typed in kilograms? Give it in grams, or choose "growing" if it is young.`, { path: 'animal.weightG', received: weightG, expected: range })
+    throw new CalcInputError('weight.implausible', `${typed} is too light for an adult of this species (adults ${range}). Was it typed in kilograms? Give it in grams, or choose "growing" if it is young.`, { path: 'animal.weightG', received: weightG, expected: range })
   }
 }

@@ -132,16 +132,23 @@ function feedsADay(context: PlanContext): { usual: number, most: number, fixed: 
   const { species, input } = context
   const [fromMinute, toMinute] = [minuteOf(input.feedingHours.from), minuteOf(input.feedingHours.to)]
   const spanMinutes = feedingSpanMinutes({ fromMinute, toMinute })
-  const most = mostFeeds({ spanMinutes, gapHours: species.minimumGapHours })
+  const gapHours = minimumGapHoursOf(context)
+  const most = mostFeeds({ spanMinutes, gapHours })
   const wanted = input.feedsPerDay
   if (wanted !== undefined) {
-    if (wanted > most) context.findings.push(makeFinding('timetable.tooManyFeeds', 'caution', 'Too many feeds for the feeding hours', `${wanted} feeds a day do not fit between ${input.feedingHours.from} and ${input.feedingHours.to} with ${formatNumber(species.minimumGapHours)} h between them: the plan has ${most}. Longer feeding hours make room.`, { path: 'feedsPerDay', expected: most, received: wanted, unit: 'feeds a day', sourceKey: 'house-rule' }))
+    if (wanted > most) context.findings.push(makeFinding('timetable.tooManyFeeds', 'caution', 'Too many feeds for the feeding hours', `${wanted} feeds a day do not fit between ${input.feedingHours.from} and ${input.feedingHours.to} with ${formatNumber(gapHours)} h between them: the plan has ${most}. Longer feeding hours make room.`, { path: 'feedsPerDay', expected: most, received: wanted, unit: 'feeds a day', sourceKey: 'house-rule' }))
     const fixed = Math.min(wanted, most)
     return { usual: fixed, most: fixed, fixed: true }
   }
   const rule = usualFeedsRule(context)
   const usual = 'count' in rule ? rule.count.value : Math.floor(spanMinutes / 60 / rule.everyHours.value + 1e-9) + 1
   return { usual: Math.max(1, Math.min(usual, most)), most, fixed: false }
+}
+
+/** Young birds and mammals are fed more often than their parents. */
+function minimumGapHoursOf(context: PlanContext): number {
+  const own = context.species.minimumGapHours
+  return context.input.animal.lifeStage === 'growing' && !context.ectotherm ? Math.min(own, context.rules.meals.growing.minimumGapHours.value) : own
 }
 
 function usualFeedsRule(context: PlanContext): UsualFeeds {

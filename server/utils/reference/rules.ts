@@ -78,7 +78,7 @@ export interface Rules {
     /** Groups that eat once per interval, not every day. */
     onceAnInterval: Group[]
     chelonianDayMlPerKg: { first: Cited, later: Cited, firstDays: Cited }
-    growing: { mammalMlPerKg: Cited, kittenMlPerKg: Cited, birdWithCropMlPerKg: Cited, squabMlPerKg: Cited, squabMl: Cited, squabSpeciesIds: string[] }
+    growing: { minimumGapHours: Cited, mammalMlPerKg: Cited, kittenMlPerKg: Cited, birdWithCropMlPerKg: Cited, squabMlPerKg: Cited, squabMl: Cited, squabSpeciesIds: string[] }
   }
   measuring: {
     syringes: { capacityMl: number, stepMl: number }[]

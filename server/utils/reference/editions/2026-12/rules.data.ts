@@ -153,6 +153,7 @@ export const rules: Rules = {
       firstDays: cited({ value: 3, unit: 'days', sourceKey: 'boxturtle', locator: 'for 3 days', howRead: 'restated', note: 'One handout.' }),
     },
     growing: {
+      minimumGapHours: cited({ value: 2, unit: 'h', sourceKey: 'hrb2020', locator: 'Tables 27.1 and 27.2: small squabs every 2 h', howRead: 'restated', note: 'Carried to all young birds and mammals.' }),
       mammalMlPerKg: cited({ value: 50, unit: 'mL/kg', sourceKey: 'afrma2009', locator: '5 % of body weight a feed', howRead: 'restated' }),
       kittenMlPerKg: cited({ value: 40, unit: 'mL/kg', sourceKey: 'lawler2008', locator: '4 mL per 100 g', howRead: 'restated' }),
       birdWithCropMlPerKg: cited({ value: 50, unit: 'mL/kg', sourceKey: 'edubirds', locator: 'crop about 50 mL/kg', howRead: 'restated' }),
