@@ -129,7 +129,7 @@ function startIndex(context: PlanContext, strengths: readonly number[]): number 
 }
 
 function feedsADay(context: PlanContext): { usual: number, most: number, fixed: boolean } {
-  const { species, input } = context
+  const { input } = context
   const [fromMinute, toMinute] = [minuteOf(input.feedingHours.from), minuteOf(input.feedingHours.to)]
   const spanMinutes = feedingSpanMinutes({ fromMinute, toMinute })
   const gapHours = minimumGapHoursOf(context)
