@@ -1,10 +1,13 @@
 import type { Issue } from '#shared/types/error'
 import type { Plan, SavedRegimen, SavedRegimenReceipt } from '#shared/types/plan'
 import { apiProblemOf, type ApiProblem } from '~/utils/apiError'
-import { draftOfInput, emptyDraft, inputOfDraft, localOf, stillNeeded, type PlannerDraft } from '~/utils/plannerDraft'
+import { draftOfInput, emptyDraft, inputOfDraft, localOf, nextDraft, startIsOld, stillNeeded, type PlannerDraft } from '~/utils/plannerDraft'
 
 /** What the planner is changing, when it is a saved plan. */
 export interface Editing { id: string, version: number, key: string | null }
+
+/** A plan that was just saved, so that the emptied form can say where it went. */
+export interface JustSaved { name: string, to: string }
 
 /** The planner: what was typed, the plan that follows, and what is wrong with it. Works nothing out itself. */
 export const usePlannerStore = defineStore('planner', () => {
@@ -15,33 +18,58 @@ export const usePlannerStore = defineStore('planner', () => {
   const localIssues = ref<Issue[]>([])
   const working = ref(false)
   const saving = ref(false)
-  const undone = ref<PlannerDraft | null>(null)
+  const undone = ref<{ draft: PlannerDraft, editing: Editing | null } | null>(null)
+  const justSaved = ref<JustSaved | null>(null)
+  /** The day an old draft begins on, until the person says what to do about it. */
+  const begunOn = ref('')
   let sequence = 0
   let aborter: AbortController | null = null
 
   const needed = computed(() => stillNeeded(draft.value))
   const issues = computed<Issue[]>(() => [...localIssues.value, ...(problem.value?.issues ?? [])])
+  /** The plan shown is not the plan of what is typed: it is dimmed, and neither saved nor printed. */
+  const behind = computed(() => working.value || problem.value !== null || localIssues.value.length > 0)
 
   /** Fills what only the browser knows. Called once it is there, so that server and browser agree on the first page. */
   function fillFromBrowser() {
     if (draft.value.timeZone === '') draft.value.timeZone = Intl.DateTimeFormat().resolvedOptions().timeZone || 'Etc/UTC'
     if (draft.value.startAt === '') draft.value.startAt = localOf(new Date())
+    // The plan of a saved animal goes on from where it began; an unsaved one from days ago is asked about.
+    if (editing.value === null && draft.value.speciesId !== '' && startIsOld(draft.value, new Date())) begunOn.value = draft.value.startAt.slice(0, 10)
+  }
+
+  /** Lets an old draft begin now: with a weight to be typed anew, or with the old one and the day it is from. */
+  function startNow(weight: 'new' | 'old') {
+    if (weight === 'new') {
+      draft.value.weight.text = ''
+      draft.value.weighedOn = ''
+    }
+    else if (draft.value.weighedOn === '') draft.value.weighedOn = begunOn.value
+    draft.value.startAt = localOf(new Date())
+    begunOn.value = ''
   }
 
   function issueAt(path: string): string | undefined {
     return issues.value.find(one => one.path === path)?.message
   }
 
+  /** Whatever is still on its way answers an older question from here on, even when nothing new is asked. */
+  function overtake(): number {
+    aborter?.abort()
+    working.value = false
+    return ++sequence
+  }
+
   /** Works the plan out again. An answer that a newer question has overtaken is dropped. */
   async function preview() {
     const { input, issues: found } = inputOfDraft(draft.value)
     localIssues.value = found
+    const mine = overtake()
     if (needed.value.length > 0 || found.length > 0) {
+      problem.value = null
       if (needed.value.length > 0) plan.value = null
       return
     }
-    const mine = ++sequence
-    aborter?.abort()
     aborter = new AbortController()
     working.value = true
     try {
@@ -66,17 +94,38 @@ export const usePlannerStore = defineStore('planner', () => {
       if (editing.value) {
         const { id, version, key } = editing.value
         await $fetch(`/api/regimens/${id}`, { method: 'PATCH', query: key ? { key } : {}, body: { ...input, baseVersion: version } })
-        editing.value = null
-        return `/plans/${id}${key ? `?key=${encodeURIComponent(key)}` : ''}`
+        return leaveWith(`/plans/${id}${key ? `?key=${encodeURIComponent(key)}` : ''}`)
       }
       const { id, key } = await $fetch<SavedRegimenReceipt>('/api/regimens', { method: 'POST', body: input })
-      return `/plans/${id}?key=${encodeURIComponent(key)}`
+      return leaveWith(`/plans/${id}?key=${encodeURIComponent(key)}`)
     }
     catch (error) {
       problem.value = apiProblemOf(error)
       return null
     }
     finally { saving.value = false }
+  }
+
+  /**
+   * Empties the form once its plan is kept: typing the next animal over it must neither double this plan nor replace it
+   * under a sheet that hangs on an enclosure.
+   */
+  function leaveWith(to: string): string {
+    justSaved.value = { name: draft.value.name.trim() || plan.value?.animal?.speciesName || 'The plan', to }
+    clear()
+    undone.value = null
+    return to
+  }
+
+  function clear() {
+    overtake()
+    draft.value = nextDraft(draft.value)
+    editing.value = null
+    plan.value = null
+    problem.value = null
+    localIssues.value = []
+    begunOn.value = ''
+    fillFromBrowser()
   }
 
   /** An unsaved plan on paper. @returns an address of the PDF in this browser, or null with the problem said. */
@@ -93,25 +142,25 @@ export const usePlannerStore = defineStore('planner', () => {
   }
 
   function startOver() {
-    undone.value = draft.value
-    draft.value = emptyDraft()
-    editing.value = null
-    plan.value = null
-    problem.value = null
-    fillFromBrowser()
+    undone.value = { draft: draft.value, editing: editing.value }
+    clear()
   }
 
   function undo() {
     if (!undone.value) return
-    draft.value = undone.value
+    draft.value = undone.value.draft
+    editing.value = undone.value.editing
     undone.value = null
   }
 
   function change(saved: SavedRegimen, key: string | null) {
+    overtake()
     draft.value = draftOfInput(saved.input)
     editing.value = { id: saved.id, version: saved.latestVersion, key }
     plan.value = saved.plan
+    undone.value = null
+    begunOn.value = ''
   }
 
-  return { draft, editing, plan, problem, working, saving, undone, needed, issues, fillFromBrowser, issueAt, preview, save, printPreview, startOver, undo, change }
+  return { draft, editing, plan, problem, working, saving, undone, justSaved, begunOn, needed, issues, behind, fillFromBrowser, startNow, issueAt, preview, save, printPreview, startOver, undo, change }
 })

@@ -5,7 +5,7 @@ import type { LengthMeasure } from '#shared/types/reference'
 import type { LifeStage, Sign } from '#shared/types/regimenLists'
 import type { LengthUnit, MassUnit, TemperatureUnit } from '#shared/utils/units'
 import { typedCelsius, typedGrams, typedMillimetres, type Typed } from './entryUnits'
-import { parseNumber } from './parseNumber'
+import { parseNumber, whyNoNumber } from './parseNumber'
 
 /** The planner's form, as typed. */
 export interface PlannerDraft {
@@ -62,6 +62,27 @@ export function emptyDraft(): PlannerDraft {
   }
 }
 
+/** An empty form for the next animal, in the same house: its syringes, people, hours and units need no typing again. */
+export function nextDraft(before: PlannerDraft): PlannerDraft {
+  const empty = emptyDraft()
+  const { syringes, kitchenScaleStep, teamName, contacts, from, to, timeZone } = before
+  const same = <Unit extends string>(typed: Typed<Unit>): Typed<Unit> => ({ text: '', unit: typed.unit })
+  return {
+    ...empty, kitchenScaleStep, teamName, from, to, timeZone,
+    syringes: syringes.map(one => ({ ...one })), contacts: contacts.map(one => ({ ...one })),
+    weight: same(before.weight), healthyWeight: same(before.healthyWeight), length: same(before.length), temperature: same(before.temperature),
+  }
+}
+
+/** How long after its start an unsaved plan is asked about, h: by then the animal may weigh and need something else. */
+const START_HOLDS_HOURS = 12
+
+/** Whether a draft found again begins too long ago to go on with unasked. */
+export function startIsOld(draft: PlannerDraft, now: Date): boolean {
+  const startMs = new Date(draft.startAt).getTime()
+  return Number.isFinite(startMs) && now.getTime() - startMs > START_HOLDS_HOURS * 3_600_000
+}
+
 /** What a plan cannot do without, in the order of the form. */
 export function stillNeeded(draft: PlannerDraft): string[] {
   const needed: [boolean, string][] = [
@@ -79,12 +100,10 @@ export function inputOfDraft(draft: PlannerDraft): { input: RegimenInput, issues
   const issues: Issue[] = []
   const optional = (text: string, path: string): number | undefined => {
     if (text.trim() === '') return undefined
-    const value = parseNumber(text)
-    if (value === null) issues.push({ path, message: 'Type a number, for example 0.4.' })
-    return value ?? undefined
+    return typed(parseNumber(text), text, path)
   }
   const typed = (value: number | null, text: string, path: string): number | undefined => {
-    if (value === null && text.trim() !== '') issues.push({ path, message: 'Type a number, for example 0.4.' })
+    if (value === null && text.trim() !== '') issues.push({ path, message: whyNoNumber(text) })
     return value ?? undefined
   }
   const words = (text: string) => text.trim() === '' ? undefined : text.trim()
@@ -103,16 +122,16 @@ export function inputOfDraft(draft: PlannerDraft): { input: RegimenInput, issues
       caseNumber: words(draft.caseNumber),
       enclosure: words(draft.enclosure),
       speciesId: draft.speciesId,
-      weightG: typedGrams(draft.weight) ?? 0,
+      weightG: typed(typedGrams(draft.weight), draft.weight.text, 'animal.weightG') ?? 0,
       weighedOn: draft.weighedOn || undefined,
       scaleStepG: optional(draft.scaleStep, 'animal.scaleStepG'),
       lengthMm: typed(typedMillimetres(draft.length), draft.length.text, 'animal.lengthMm'),
       lengthMeasure: draft.lengthMeasure || undefined,
       healthyWeightG: typed(typedGrams(draft.healthyWeight), draft.healthyWeight.text, 'animal.healthyWeightG'),
       bodyConditionScore: draft.score ?? undefined,
-      drynessPercent: parseNumber(draft.dryness) ?? 0,
+      drynessPercent: optional(draft.dryness, 'animal.drynessPercent') ?? 0,
       bodyTemperatureC: typed(typedCelsius(draft.temperature), draft.temperature.text, 'animal.bodyTemperatureC'),
-      daysUnfed: parseNumber(draft.daysUnfed) ?? 0,
+      daysUnfed: optional(draft.daysUnfed, 'animal.daysUnfed') ?? 0,
       lifeStage: draft.lifeStage,
       signs: draft.signs,
     },
@@ -145,7 +164,7 @@ function instantOf(local: string): string {
   return Number.isNaN(at.getTime()) ? local : at.toISOString()
 }
 
-/** The form of a saved plan, so that it can be changed. */
+/** The form of a saved plan, so that it can be changed. The day it was weighed is said aloud: a new weight has a new day. */
 export function draftOfInput(input: RegimenInput): PlannerDraft {
   const { animal, feed, overrides } = input
   const written = (value: number | undefined) => value === undefined ? '' : String(value)
@@ -154,7 +173,7 @@ export function draftOfInput(input: RegimenInput): PlannerDraft {
   return {
     ...base,
     name: animal.name ?? '', caseNumber: animal.caseNumber ?? '', enclosure: animal.enclosure ?? '', speciesId: animal.speciesId,
-    weight: { text: written(animal.weightG), unit: 'g' }, weighedOn: animal.weighedOn ?? '', scaleStep: written(animal.scaleStepG),
+    weight: { text: written(animal.weightG), unit: 'g' }, weighedOn: animal.weighedOn ?? localOf(new Date(input.startAt)).slice(0, 10), scaleStep: written(animal.scaleStepG),
     length: { text: written(animal.lengthMm), unit: 'mm' }, lengthMeasure: animal.lengthMeasure ?? '',
     temperature: { text: written(animal.bodyTemperatureC), unit: 'degC' }, healthyWeight: { text: written(animal.healthyWeightG), unit: 'g' },
     score: animal.bodyConditionScore ?? null, dryness: written(animal.drynessPercent), daysUnfed: written(animal.daysUnfed), lifeStage: animal.lifeStage, signs: [...animal.signs],

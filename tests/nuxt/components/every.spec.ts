@@ -6,6 +6,8 @@ import PlanAmount from '~/components/plan/PlanAmount.vue'
 import PlanBarrel from '~/components/plan/PlanBarrel.vue'
 import PlanCondition from '~/components/plan/PlanCondition.vue'
 import PlanDayTable from '~/components/plan/PlanDayTable.vue'
+import PlanFluids from '~/components/plan/PlanFluids.vue'
+import PlanGiving from '~/components/plan/PlanGiving.vue'
 import PlanFindings from '~/components/plan/PlanFindings.vue'
 import PlanGateBand from '~/components/plan/PlanGateBand.vue'
 import PlanKeyFigures from '~/components/plan/PlanKeyFigures.vue'
@@ -22,6 +24,7 @@ import PlannerFeed from '~/components/planner/PlannerFeed.vue'
 import PlannerForm from '~/components/planner/PlannerForm.vue'
 import PlannerHouse from '~/components/planner/PlannerHouse.vue'
 import SpeciesPicker from '~/components/planner/SpeciesPicker.vue'
+import TapePicture from '~/components/planner/TapePicture.vue'
 import PrintChoices from '~/components/print/PrintChoices.vue'
 import EquationCard from '~/components/reference/EquationCard.vue'
 import ReportNumber from '~/components/reference/ReportNumber.vue'
@@ -32,6 +35,8 @@ import UiField from '~/components/ui/UiField.vue'
 import UiQuantity from '~/components/ui/UiQuantity.vue'
 import UiSelect from '~/components/ui/UiSelect.vue'
 import UiText from '~/components/ui/UiText.vue'
+import { formatDay } from '#shared/utils/calendar'
+import { formatNumber } from '#shared/utils/quantity'
 import { buildPlan } from '#server/utils/plan/buildPlan'
 import { currentEdition } from '#server/utils/reference'
 import { regimenInput } from '../../unit/plan/inputs'
@@ -62,10 +67,13 @@ const CASES: [string, Component, Record<string, unknown>?, Record<string, unknow
   ['PlanFindings', PlanFindings, { findings: plan.findings, heading: 'Before the first feed' }],
   ['PlanGateBand', PlanGateBand, { gate: plan.gate }],
   ['PlanKeyFigures', PlanKeyFigures, { plan }],
+  ['PlanFluids', PlanFluids, { plan }],
+  ['PlanGiving', PlanGiving, { plan }],
   ['PlanMixing', PlanMixing, { plan }],
   ['PlanWorking', PlanWorking, { steps: plan.energy.steps, sourceKey: 'andrews1985' }],
   ['SourceMark', SourceMark, { sourceKey: 'house-rule' }],
   ...(['lizard', 'snake', 'chelonian', 'bird-other', 'mammal-placental', 'amphibian-anuran'] as const).map((group): [string, Component, Record<string, unknown>] => [`ConditionPicture, ${group}`, ConditionPicture, { group, score: 1 }]),
+  ...(['lizard', 'snake', 'chelonian', 'amphibian-anuran'] as const).map((group): [string, Component, Record<string, unknown>] => [`TapePicture, ${group}`, TapePicture, { group, measure: group === 'chelonian' ? 'carapace' : 'snout-vent' }]),
   ['ConditionScore', ConditionScore, { group: 'lizard', modelValue: 2 }],
   ['PlannerAnimal', PlannerAnimal], ['PlannerCondition', PlannerCondition], ['PlannerFeed', PlannerFeed], ['PlannerHouse', PlannerHouse], ['PlannerForm', PlannerForm],
   ['SpeciesPicker', SpeciesPicker, { species: [...edition.species.values()], modelValue: '' }],
@@ -133,10 +141,42 @@ describe('the species picker', () => {
 })
 
 describe('the staircase', () => {
-  it('has a column for each day up to full meals, and says it in words', async () => {
+  it.each(['a gecko', 'a snake'] as const)('of %s has a column for each day before food and each step after, and says it in words', async (name) => {
+    const plan = PLANS[name]
     const stairs = await mountSuspended(PlanStaircase, { props: { plan } })
-    expect(stairs.findAll('svg > g')).toHaveLength(plan.days.findIndex(day => day.stage === 'full') + 1)
+    const before = plan.days.filter(day => day.stage === 'warm' || day.stage === 'fluids').length
+    expect(stairs.findAll('svg > svg')).toHaveLength(before + plan.ramp.steps.length)
     for (const step of plan.ramp.steps) expect(stairs.get('figcaption').text()).toContain(`${Math.round(step.fraction * 100)}`)
+  })
+})
+
+describe('a page opened days later', () => {
+  const later = plan.days.filter(day => day.feeds.length > 0)[2]!
+  it('shows the amount of that day, not of the first', async () => {
+    const amount = await mountSuspended(PlanAmount, { props: { plan, today: later.date } })
+    expect(amount.text()).toContain('Each feed today')
+    expect(amount.get('strong').text()).toBe(formatNumber(later.feeds[0]!.volumeMl, 3))
+    const table = await mountSuspended(PlanDayTable, { props: { plan, today: later.date } })
+    expect(table.findAll('tbody tr').find(row => row.text().includes('today'))!.text()).toContain(formatDay(later.date))
+  })
+  it('offers no amount as due once the weight is too old', async () => {
+    const amount = await mountSuspended(PlanAmount, { props: { plan, today: later.date, held: true } })
+    expect(amount.text()).toContain('Only once the reasons above are gone')
+    expect(amount.text()).not.toContain('Each feed today')
+  })
+})
+
+describe('the key figures', () => {
+  it('open one working at a time, each named for its figure', async () => {
+    const figures = await mountSuspended(PlanKeyFigures, { props: { plan } })
+    const [energy, water] = figures.findAll('button')
+    await energy!.trigger('click')
+    expect(figures.text()).toContain(plan.energy.steps[0]!.label)
+    await water!.trigger('click')
+    expect(figures.text()).toContain(plan.fluids.steps[0]!.label)
+    expect(figures.text()).not.toContain(plan.energy.steps[0]!.label)
+    expect(figures.findAll('button').map(one => one.attributes('aria-expanded'))).toEqual(['false', 'true', 'false', 'false'])
+    expect(energy!.text()).toContain('Energy at full meals')
   })
 })
 

@@ -87,6 +87,30 @@ describe('preview', () => {
     expect(planner.issueAt('animal.weightG')).toBe('Too heavy.')
   })
 
+  it('drops an answer to what was since taken away', async () => {
+    let release = () => {}
+    const held = new Promise<void>(resolve => release = resolve)
+    answer = body => held.then(() => planOf(body))
+    planner.draft = filled('22')
+    const first = planner.preview()
+    planner.draft.weight.text = ''
+    await planner.preview()
+    release()
+    await first
+    expect(planner.plan).toBeNull()
+    expect(planner.working).toBe(false)
+  })
+
+  it('says that the plan shown is behind what is typed', async () => {
+    planner.draft = filled('22')
+    await planner.preview()
+    expect(planner.behind).toBe(false)
+    planner.draft.temperature.text = 'warm'
+    await planner.preview()
+    expect(planner.behind).toBe(true)
+    expect(planner.plan?.animal.weightG).toBe(22)
+  })
+
   it('is rid of a problem as soon as the plan can be worked out', async () => {
     answer = refuse(422, { code: 'a.b', message: 'No.', issues: [{ path: 'startAt', message: 'No.' }] })
     planner.draft = filled('22')
@@ -105,6 +129,15 @@ describe('save', () => {
     expect(await planner.save()).toBe('/plans/abc?key=k%2F%2B%3D')
     expect(asked[0]?.baseVersion).toBeUndefined()
     expect(planner.saving).toBe(false)
+  })
+
+  it('empties the form for the next animal, keeps the house and says where the plan went', async () => {
+    answer = () => ({ id: 'abc', version: 1, key: 'k', link: '' })
+    planner.draft = filled('22', { name: 'Pebble', teamName: 'Saltings Rescue' })
+    await planner.save()
+    expect(planner.draft).toMatchObject({ name: '', speciesId: '', weight: { text: '' }, teamName: 'Saltings Rescue' })
+    expect(planner.plan).toBeNull()
+    expect(planner.justSaved).toEqual({ name: 'Pebble', to: '/plans/abc?key=k' })
   })
 
   it('saves a change on top of the version it was made from', async () => {
@@ -126,7 +159,41 @@ describe('save', () => {
   })
 })
 
+describe('a draft from days ago', () => {
+  const OLD = '2020-12-02T09:00'
+  it('is asked about, and begins now with a weight to be typed anew', () => {
+    planner.draft = filled('22', { startAt: OLD })
+    planner.fillFromBrowser()
+    expect(planner.begunOn).toBe('2020-12-02')
+    planner.startNow('new')
+    expect(planner.draft.weight.text).toBe('')
+    expect(planner.draft.weighedOn).toBe('')
+    expect(planner.draft.startAt > OLD).toBe(true)
+    expect(planner.begunOn).toBe('')
+  })
+  it('or keeps the weight with the day it is from', () => {
+    planner.draft = filled('22', { startAt: OLD })
+    planner.fillFromBrowser()
+    planner.startNow('old')
+    expect(planner.draft).toMatchObject({ weight: { text: '22' }, weighedOn: '2020-12-02' })
+  })
+  it('of a saved plan goes on from where it began', () => {
+    planner.change({ id: 'abc', version: 1, latestVersion: 1, input: regimenInput(), plan: {} as Plan } as SavedRegimen, null)
+    planner.draft.startAt = OLD
+    planner.fillFromBrowser()
+    expect(planner.begunOn).toBe('')
+  })
+})
+
 describe('starting over', () => {
+  it('while changing a saved plan, and undone, still changes that plan', () => {
+    planner.change({ id: 'abc', version: 1, latestVersion: 2, input: regimenInput(), plan: {} as Plan } as SavedRegimen, 'k')
+    planner.startOver()
+    expect(planner.editing).toBeNull()
+    planner.undo()
+    expect(planner.editing).toEqual({ id: 'abc', version: 2, key: 'k' })
+  })
+
   it('empties the form, and can be undone', () => {
     planner.draft = filled('22', { name: 'Pebble' })
     planner.startOver()

@@ -1,6 +1,6 @@
 import { afterEach, describe, expect, it } from 'vitest'
 import { RegimenInput } from '../../../shared/schemas/regimen'
-import { draftOfInput, emptyDraft, inputOfDraft, localOf, stillNeeded, type PlannerDraft } from '../../../utils/plannerDraft'
+import { draftOfInput, emptyDraft, inputOfDraft, localOf, nextDraft, startIsOld, stillNeeded, type PlannerDraft } from '../../../utils/plannerDraft'
 import { regimenInput } from '../plan/inputs'
 
 function filled(change: Partial<PlannerDraft> = {}): PlannerDraft {
@@ -37,19 +37,40 @@ describe('inputOfDraft', () => {
     [{ length: { text: 'long', unit: 'cm' } }, 'animal.lengthMm'],
     [{ temperature: { text: 'warm', unit: 'degC' } }, 'animal.bodyTemperatureC'],
     [{ healthyWeight: { text: '1,250', unit: 'g' } }, 'animal.healthyWeightG'],
+    [{ weight: { text: '1,250', unit: 'g' } }, 'animal.weightG'],
+    [{ dryness: 'very' }, 'animal.drynessPercent'],
+    [{ daysUnfed: 'many' }, 'animal.daysUnfed'],
     [{ scaleStep: 'fine' }, 'animal.scaleStepG'],
     [{ feedsPerDay: 'few' }, 'feedsPerDay'],
     [{ syringes: [{ capacity: 'big', step: '0.1' }] }, 'syringes.0.capacityMl'],
     [{ fractions: '10 twenty' }, 'overrides.fractions.1'],
     [{ feedMode: 'energy', own: { ...emptyDraft().own, energy: 'rich' } }, 'feed.energyKcalPerMl'],
   ])('says where a word stands for a number: %j', (change, path) => {
-    expect(inputOfDraft(filled(change)).issues).toEqual([{ path, message: 'Type a number, for example 0.4.' }])
+    expect(inputOfDraft(filled(change)).issues).toEqual([{ path, message: expect.stringMatching(/^Type a number, for example 0\.4\.$|^This can be read two ways\./) }])
   })
 
   it('sends a flush only with a tube', () => {
     expect(inputOfDraft(filled({ flush: '1' })).input.flushMl).toBeUndefined()
     expect(inputOfDraft(filled({ flush: '1', route: 'tube' })).input.flushMl).toBe(1)
   })
+})
+
+describe('nextDraft', () => {
+  it('keeps the house and nothing of the animal', () => {
+    const before = filled({ name: 'Pebble', score: 1, signs: ['swollen'], teamName: 'Saltings Rescue', from: '06:00', syringes: [{ capacity: '1', step: '0.01' }], scaleStep: '0.1', weight: { text: '0.8', unit: 'oz' }, tier: 'low', weighedOn: '2026-12-01' })
+    const next = nextDraft(before)
+    expect(next).toEqual({ ...emptyDraft(), teamName: 'Saltings Rescue', from: '06:00', timeZone: 'Europe/London', syringes: [{ capacity: '1', step: '0.01' }], weight: { text: '', unit: 'oz' } })
+    next.syringes[0]!.step = '0.1'
+    expect(before.syringes[0]!.step).toBe('0.01')
+  })
+})
+
+describe('startIsOld', () => {
+  it.each([[0, false], [11.9, false], [12.1, true], [72, true], [-24, false]])('%d h after the start: %s', (hours, old) => {
+    const draft = filled({ startAt: '2026-12-02T09:00' })
+    expect(startIsOld(draft, new Date(new Date(draft.startAt).getTime() + hours * 3_600_000))).toBe(old)
+  })
+  it('knows nothing of a start that is none', () => expect(startIsOld(filled({ startAt: '' }), new Date())).toBe(false))
 })
 
 describe('draftOfInput', () => {
