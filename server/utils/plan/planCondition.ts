@@ -48,7 +48,7 @@ function usableLengthMm(context: PlanContext): number | null {
   const known = context.species.adultLengthMm
   if (lengthMm === undefined || known === null) return lengthMm ?? null
   if (lengthMeasure !== undefined && lengthMeasure !== known.measure) {
-    context.findings.push(makeFinding('condition.otherMeasure', 'note', 'Length measured another way', `The figures of this species are for ${measureWords(known.measure)}. The length you gave is not used for its expected weight.`, { path: 'animal.lengthMeasure', expected: known.measure, received: lengthMeasure }))
+    context.findings.push(makeFinding('condition.otherMeasure', 'note', 'Length measured another way', `The figures of this species are for ${measureWords(known.measure)}. The length you gave serves at most for the rough estimate of its whole group.`, { path: 'animal.lengthMeasure', expected: known.measure, received: lengthMeasure }))
     return null
   }
   const longest = (known.publishedMaximumMm ?? known.high) * context.rules.condition.lengthOverMaximum.value
