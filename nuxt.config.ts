@@ -32,8 +32,6 @@ export default defineNuxtConfig({
   tailwindcss: { cssPath: ['~/assets/css/main.css', { injectPosition: 'first' }], viewer: false },
 
   runtimeConfig: {
-    // Where database, uploads and secret live; NUXT_DATA_DIR moves it.
-    dataDir: '.data',
     // Multiplies the limits of requests per address; raised in tests and benchmarks.
     rateLimitFactor: 1,
     // The password is made on first start (server/plugins/00.secret.ts). The cookie says only which plans this browser knows;

@@ -1,8 +1,17 @@
 import { describe, expect, it } from 'vitest'
+import { filesUnder } from '../../guards/files'
 import { baseUrl } from '../server'
 import { ask, expectOurShape, juniper, rowCounts } from './client'
 
 interface OpenApi { info: { title: string, version: string }, paths: Record<string, Record<string, { summary?: string, responses?: Record<string, { description?: string }>, requestBody?: { description?: string } }>> }
+
+/** Every route by its file: `[id]/sheet.pdf.get.ts` is `get /api/regimens/{id}/sheet.pdf`. The catch-all is none of them. */
+function routesInFiles(): string[] {
+  return filesUnder('server/api', ['.ts']).filter(file => !file.includes('[...]')).map((file) => {
+    const [, path, method] = /^server(.+?)(?:\/index)?\.(get|post|put|patch|delete)\.ts$/.exec(file) ?? []
+    return `${method} ${path?.replace(/\[(\w+)\]/g, '{$1}')}`
+  }).sort()
+}
 
 describe('an address', () => {
   it.each(['GET', 'POST', 'PUT', 'PATCH', 'DELETE'])('that is none answers 404 to %s', async method => expectOurShape(await ask(method, '/api/nothing/here', method === 'GET' ? undefined : {}), 404, 'route.notFound'))
@@ -31,7 +40,8 @@ describe('the OpenAPI document', () => {
     const { json } = await ask<OpenApi>('GET', '/_openapi.json')
     expect(json.info.title).toBe('Thimbleful')
     const own = Object.entries(json.paths).filter(([path]) => /^\/api\/(health|regimens|reference)/.test(path))
-    expect(own.length).toBeGreaterThanOrEqual(11)
+    const listed = own.flatMap(([path, methods]) => Object.keys(methods).map(method => `${method} ${path}`))
+    expect(listed.sort()).toEqual(routesInFiles())
     for (const [path, methods] of own) {
       for (const [method, described] of Object.entries(methods)) {
         expect(described.summary, `${method} ${path}`).toMatch(/\w{3,}/)
