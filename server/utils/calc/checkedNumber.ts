@@ -15,7 +15,8 @@ import { CalcInputError } from './calcInputError'
  */
 export function checkedNumber(value: number, quantity: string, unit: string, low: number, high = Number.POSITIVE_INFINITY): number {
   if (!Number.isFinite(value) || value < low || value > high) {
-    const range = high === Number.POSITIVE_INFINITY ? `${low} ${unit} or more` : `from ${low} to ${high} ${unit}`
+    const least = low === Number.MIN_VALUE ? 'above 0' : undefined
+    const range = high === Number.POSITIVE_INFINITY ? (least ? `${least} ${unit}` : `${low} ${unit} or more`) : least ? `${least}, up to ${high} ${unit}` : `from ${low} to ${high} ${unit}`
     throw new CalcInputError('number.outOfRange', `${quantity.charAt(0).toUpperCase()}${quantity.slice(1)} must be ${range}.`, { received: value, expected: range })
   }
   return value

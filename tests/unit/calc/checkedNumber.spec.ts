@@ -12,4 +12,8 @@ describe('checkedNumber', () => {
     expect(() => checkedNumber(value, 'the weight', 'g', 0.1, 5)).toThrow(CalcInputError)
     expect(() => checkedNumber(value, 'the weight', 'g', 0.1, 5)).toThrow('The weight must be from 0.1 to 5 g.')
   })
+  it('says "above 0" where anything above it will do', () => {
+    expect(() => checkedNumber(0, 'the weight', 'g', Number.MIN_VALUE)).toThrow('The weight must be above 0 g.')
+    expect(() => checkedNumber(0, 'the weight', 'g', Number.MIN_VALUE, 5)).toThrow('The weight must be above 0, up to 5 g.')
+  })
 })

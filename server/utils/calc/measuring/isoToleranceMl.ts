@@ -28,7 +28,7 @@ export interface SyringeToleranceClass {
  */
 export function isoToleranceMl(input: { capacityMl: number, volumeMl: number }, classes: readonly SyringeToleranceClass[]): number {
   const capacity = checkedNumber(input.capacityMl, 'the capacity', 'mL', Number.MIN_VALUE)
-  const volume = checkedNumber(input.volumeMl, 'the volume', 'mL', Number.MIN_VALUE, capacity * (1 + 1e-9))
+  const volume = checkedNumber(input.volumeMl, 'the volume', 'mL', Number.MIN_VALUE, capacity * (1 + 1e-6))
   const row = classes.find(one => capacity < one.underCapacityMl)
   if (!row) throw new CalcInputError('syringe.noClass', `No tolerance is known for a syringe of ${capacity} mL.`)
   return volume < capacity / 2 ? row.ofCapacity * capacity + row.ofVolume * volume : row.ofVolumeFromHalf * volume

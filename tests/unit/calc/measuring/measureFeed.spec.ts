@@ -20,5 +20,10 @@ describe('measureFeed', () => {
     expect(draw(0.3, 1, [{ capacityMl: 0.5, stepMl: 0.25 }, { capacityMl: 1, stepMl: 0.05 }])).toMatchObject({ syringe: { capacityMl: 1 }, markMl: 0.3 })
   })
   it('never passes the limit', () => expect(draw(5, 0.999)!.volumeMl).toBeLessThanOrEqual(0.999))
+  it('draws up to the end of a syringe whose capacity has many decimals', () => {
+    const odd = { capacityMl: 0.78446298, stepMl: 0.07844629 }
+    const drawn = draw(0.9, 1000, [odd])!
+    expect(drawn.markMl).toBeLessThanOrEqual(odd.capacityMl * (1 + 1e-6))
+  })
   it('refuses nonsense', () => expect(() => draw(Number.NaN)).toThrow())
 })
