@@ -8,7 +8,7 @@ const base = process.env.E2E_BASE_URL!
 let browser: Browser
 let savedPath = ''
 
-const PAGES = ['/', '/plans', '/species', '/equations', '/sources', '/nowhere']
+const PAGES = ['/', '/plans', '/species', '/equations', '/sources', '/print/preview', '/nowhere']
 
 beforeAll(async () => {
   browser = await launchBrowser()
