@@ -8,6 +8,7 @@ const PAUSE_MS = 200
 /** Ties the planner to this browser: the draft survives a reload, and each change works the plan out again. */
 export function usePlannerDraft() {
   const planner = usePlannerStore()
+  const session = useSessionStore()
   const kept = useLocalStorage<PlannerDraft>('thimbleful.draft', emptyDraft(), { initOnMounted: true, mergeDefaults: true, writeDefaults: false })
   // Beside it, which saved plan the draft changes: a reload must not turn a new version into a second plan.
   const keptEditing = useLocalStorage<Editing | null>('thimbleful.editing', null, { initOnMounted: true, writeDefaults: false, serializer: StorageSerializers.object })
@@ -22,6 +23,7 @@ export function usePlannerDraft() {
       planner.editing = keptEditing.value
       planner.draft = { ...emptyDraft(), ...JSON.parse(JSON.stringify(kept.value)) }
     }
+    if (session.team && session.may('plan.edit')) planner.fillFromTeam(session.team)
     planner.fillFromBrowser()
     scope?.run(() => {
       watch(() => planner.draft, (draft) => {

@@ -1,10 +1,11 @@
 import type { Issue } from '#shared/types/error'
 import type { Plan, SavedRegimen, SavedRegimenReceipt } from '#shared/types/plan'
+import type { Me } from '#shared/types/team'
 import { apiProblemOf, type ApiProblem } from '~/utils/apiError'
-import { draftOfInput, emptyDraft, inputOfDraft, localOf, nextDraft, startIsOld, stillNeeded, type PlannerDraft } from '~/utils/plannerDraft'
+import { draftOfInput, draftInHouse, emptyDraft, inputOfDraft, isUntouched, localOf, nextDraft, startIsOld, stillNeeded, type PlannerDraft } from '~/utils/plannerDraft'
 
 /** What the planner is changing, when it is a saved plan. */
-export interface Editing { id: string, version: number, key: string | null }
+export interface Editing { id: string, version: number, key: string | null, /** A team's plan, opened by a member. */ team?: boolean }
 
 /** A plan that was just saved, so that the emptied form can say where it went. */
 export interface JustSaved { name: string, to: string }
@@ -22,6 +23,10 @@ export const usePlannerStore = defineStore('planner', () => {
   const justSaved = ref<JustSaved | null>(null)
   /** The day an old draft begins on, until the person says what to do about it. */
   const begunOn = ref('')
+  /** The team whose settings the form was filled in from. */
+  const filledFrom = ref('')
+  /** What changed, for the version that is about to be saved. */
+  const note = ref('')
   let sequence = 0
   let aborter: AbortController | null = null
 
@@ -29,6 +34,13 @@ export const usePlannerStore = defineStore('planner', () => {
   const issues = computed<Issue[]>(() => [...localIssues.value, ...(problem.value?.issues ?? [])])
   /** The plan shown is not the plan of what is typed: it is dimmed, and neither saved nor printed. */
   const behind = computed(() => working.value || problem.value !== null || localIssues.value.length > 0)
+
+  /** Fills in the house from the team's settings, as long as nothing of an animal is typed. */
+  function fillFromTeam(team: NonNullable<Me['team']>) {
+    if (editing.value !== null || !isUntouched(draft.value)) return
+    draft.value = draftInHouse(draft.value, team)
+    filledFrom.value = team.name
+  }
 
   /** Fills what only the browser knows. Called once it is there, so that server and browser agree on the first page. */
   function fillFromBrowser() {
@@ -93,17 +105,33 @@ export const usePlannerStore = defineStore('planner', () => {
     try {
       if (editing.value) {
         const { id, version, key } = editing.value
-        await $fetch(`/api/regimens/${id}`, { method: 'PATCH', query: key ? { key } : {}, body: { ...input, baseVersion: version } })
+        await $fetch(`/api/regimens/${id}`, { method: 'PATCH', query: key ? { key } : {}, body: { ...input, baseVersion: version, ...(note.value.trim() && { note: note.value.trim() }) } })
         return leaveWith(`/plans/${id}${key ? `?key=${encodeURIComponent(key)}` : ''}`)
       }
       const { id, key } = await $fetch<SavedRegimenReceipt>('/api/regimens', { method: 'POST', body: input })
-      return leaveWith(`/plans/${id}?key=${encodeURIComponent(key)}`)
+      // A plan of a team has no key: being a member opens it.
+      return leaveWith(`/plans/${id}${key ? `?key=${encodeURIComponent(key)}` : ''}`)
     }
     catch (error) {
       problem.value = apiProblemOf(error)
       return null
     }
     finally { saving.value = false }
+  }
+
+  /** Somebody saved meanwhile, and the person has read what: theirs becomes the version after it. */
+  async function saveOnTop(): Promise<string | null> {
+    if (!editing.value) return null
+    const { id, key } = editing.value
+    try {
+      const { latestVersion } = await $fetch<SavedRegimen>(`/api/regimens/${id}`, { query: key ? { key } : {} })
+      editing.value = { ...editing.value, version: latestVersion }
+    }
+    catch (error) {
+      problem.value = apiProblemOf(error)
+      return null
+    }
+    return save()
   }
 
   /**
@@ -125,6 +153,7 @@ export const usePlannerStore = defineStore('planner', () => {
     problem.value = null
     localIssues.value = []
     begunOn.value = ''
+    note.value = ''
     fillFromBrowser()
   }
 
@@ -153,14 +182,16 @@ export const usePlannerStore = defineStore('planner', () => {
     undone.value = null
   }
 
-  function change(saved: SavedRegimen, key: string | null) {
+  function change(saved: SavedRegimen & { team?: unknown }, key: string | null) {
     overtake()
     draft.value = draftOfInput(saved.input)
-    editing.value = { id: saved.id, version: saved.latestVersion, key }
+    editing.value = { id: saved.id, version: saved.latestVersion, key, ...(saved.team ? { team: true } : {}) }
     plan.value = saved.plan
     undone.value = null
     begunOn.value = ''
+    filledFrom.value = ''
+    note.value = ''
   }
 
-  return { draft, editing, plan, problem, working, saving, undone, justSaved, begunOn, needed, issues, behind, fillFromBrowser, startNow, issueAt, preview, save, printPreview, startOver, undo, change }
+  return { draft, editing, plan, problem, working, saving, undone, justSaved, begunOn, filledFrom, note, needed, issues, behind, fillFromTeam, fillFromBrowser, startNow, issueAt, preview, save, saveOnTop, printPreview, startOver, undo, change }
 })

@@ -3,6 +3,7 @@ import type { Issue } from '#shared/types/error'
 import type { Route, Tier } from '#shared/types/plan'
 import type { LengthMeasure } from '#shared/types/reference'
 import type { LifeStage, Sign } from '#shared/types/regimenLists'
+import type { Me } from '#shared/types/team'
 import type { LengthUnit, MassUnit, TemperatureUnit } from '#shared/utils/units'
 import { typedCelsius, typedGrams, typedMillimetres, type Typed } from './entryUnits'
 import { parseNumber, whyNoNumber } from './parseNumber'
@@ -71,6 +72,21 @@ export function nextDraft(before: PlannerDraft): PlannerDraft {
     ...empty, kitchenScaleStep, teamName, from, to, timeZone,
     syringes: syringes.map(one => ({ ...one })), contacts: contacts.map(one => ({ ...one })),
     weight: same(before.weight), healthyWeight: same(before.healthyWeight), length: same(before.length), temperature: same(before.temperature),
+  }
+}
+
+/** Whether nothing of an animal is typed yet, so that the house may still be filled in. */
+export function isUntouched(draft: PlannerDraft): boolean {
+  return draft.speciesId === '' && [draft.name, draft.caseNumber, draft.enclosure, draft.weight.text].every(text => text.trim() === '')
+}
+
+/** The form in the house of a team: its hours, time zone, name, people to call and syringes. What a team has not set stays. */
+export function draftInHouse(before: PlannerDraft, team: NonNullable<Me['team']>): PlannerDraft {
+  const { timeZone, feedingHours, contacts, syringes } = team.settings
+  return {
+    ...before, timeZone, from: feedingHours.from, to: feedingHours.to, teamName: team.name,
+    contacts: contacts.length > 0 ? contacts.map(({ role, name, phone }) => ({ role, name, phone })) : before.contacts,
+    syringes: syringes.length > 0 ? syringes.map(one => ({ capacity: String(one.capacityMl), step: String(one.stepMl) })) : before.syringes,
   }
 }
 

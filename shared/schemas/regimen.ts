@@ -3,56 +3,10 @@ import { z } from 'zod'
 import { LENGTH_MEASURES } from '../types/reference'
 import { LIFE_STAGES, PAPERS, SIGN_IDS } from '../types/regimenLists'
 import { ROUTES, TIERS } from '../types/plan'
+import { CalendarDate, ClockTime, Instant, number, text, TimeZone } from './fields'
 
 export { LIFE_STAGES, PAPERS, SIGN_IDS, SIGNS } from '../types/regimenLists'
 export type { LifeStage, Paper, Sign } from '../types/regimenLists'
-
-const number = (what: string, unit: string, low: number, high: number) =>
-  z.number({ error: issue => issue.input === undefined ? `Give ${what} in ${unit}.` : `${capital(what)} must be a number in ${unit}.` })
-    .min(low, `${capital(what)} must be at least ${low} ${unit}.`)
-    .max(high, `${capital(what)} must be at most ${high.toLocaleString('en-GB')} ${unit}.`)
-
-function capital(text: string) {
-  return text.charAt(0).toUpperCase() + text.slice(1)
-}
-
-// Control characters, and those that turn the direction of writing: on a sheet they could reorder an amount beside a name.
-const UNSEEN = /[\p{Cc}\u200E\u200F\u202A-\u202E\u2066-\u2069]+/gu
-
-const text = (what: string, most: number) =>
-  z.string({ error: `${capital(what)} must be text.` }).overwrite(value => value.replace(UNSEEN, ' ')).trim().max(most, `${capital(what)} can have at most ${most} characters.`)
-
-const CalendarDate = z.string({ error: 'Give the date as YYYY-MM-DD, for example 2026-12-03.' }).refine((value) => {
-  const match = /^(\d{4})-(\d{2})-(\d{2})$/.exec(value)
-  if (!match) return false
-  const date = new Date(`${value}T00:00:00Z`)
-  return !Number.isNaN(date.getTime()) && date.toISOString().slice(0, 10) === value
-}, 'This date does not exist. Give it as YYYY-MM-DD, for example 2026-12-03.')
-
-const Instant = z.string({ error: 'Give the start as a date and time with its offset, for example 2026-12-03T18:00:00Z.' }).refine((value) => {
-  const match = /^(\d{4}-\d{2}-\d{2})T\d{2}:\d{2}(:\d{2}(\.\d{1,3})?)?(Z|[+-]\d{2}:\d{2})$/.exec(value)
-  // Time zones are only known for our own times.
-  return match !== null && value >= '2000' && value < '2101' && CalendarDate.safeParse(match[1]).success && !Number.isNaN(Date.parse(value))
-}, 'The start must be a date and time that exists, with its offset, for example 2026-12-03T18:00:00Z.')
-
-const ClockTime = z.string({ error: 'Give a clock time as HH:MM, for example 07:30.' })
-  .regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'Give a clock time as HH:MM, for example 07:30.')
-
-// Asking the runtime for a zone costs more than checking the rest of the input; there are only some hundred of them.
-const knownZones = new Set<string>()
-
-function isTimeZone(zone: string): boolean {
-  if (knownZones.has(zone)) return true
-  try {
-    new Intl.DateTimeFormat('en-GB', { timeZone: zone })
-  }
-  catch { return false }
-  if (knownZones.size < 1000) knownZones.add(zone)
-  return true
-}
-
-const TimeZone = z.string({ error: 'Give the time zone by name, for example Europe/London.' }).max(64)
-  .refine(isTimeZone, 'This time zone is not known. Give its name, for example Europe/London.')
 
 export const SyringeInput = z.object({
   capacityMl: number('the capacity of a syringe', 'mL', 0.1, 100),

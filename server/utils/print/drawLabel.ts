@@ -7,7 +7,7 @@ import type { LabelModel, LabelStrip } from './label'
 import { BODY_SIZE, footBlock, BLOCK_GAP, gapBlock, LARGE_SIZE, paragraphBlock, stack, stateBandBlock, type Block } from './pageParts'
 import { plain, strong, type Run } from './richText'
 import { breakLines } from './shaping'
-import { held } from './wording'
+import { haltsOf, held } from './wording'
 
 /** Half a sheet is A5 less its margins. */
 const HALF = millimetres(102)
@@ -19,7 +19,8 @@ export async function drawLabels(model: LabelModel, paper: Paper, info: Document
   const pages: Block[][] = [[]]
   let used = 0
   for (const strip of model.strips.map(stripBlock)) {
-    if (used > 0 && used + strip.height > room) {
+    // Below its cutting line the last strip needs no room.
+    if (used > 0 && used + strip.height - BLOCK_GAP > room) {
       pages.push([])
       used = 0
     }
@@ -49,7 +50,7 @@ function stripBlock(strip: LabelStrip): Block {
   const named = [identity.name && identity.species, identity.caseNumber && `case ${identity.caseNumber}`, identity.weight].filter(Boolean).join(', ')
   const last: Run[] = [strong(strip.last), ...strip.call ? [plain(` ${strip.call.role}:\u00A0`), strong(held(strip.call.phone!))] : []]
   const body = stack([
-    ...coded.superseded ? [paragraphBlock([strong(coded.superseded)], LARGE_SIZE)] : [],
+    ...haltsOf(coded).map(text => paragraphBlock([strong(text)], LARGE_SIZE)),
     { height: linesHeight(name, 26), draw: (canvas, top) => void canvas.lines(0, top, name, 26) },
     ...identity.enclosure ? [paragraphBlock([strong(identity.enclosure)], LARGE_SIZE, BOX_WIDTH - inset * 2)] : [],
     paragraphBlock(named, BODY_SIZE, BOX_WIDTH - inset * 2),
@@ -57,7 +58,7 @@ function stripBlock(strip: LabelStrip): Block {
     ...strip.band.state === 'do-not-feed' ? [wordBlock(strip.band.word), paragraphBlock([strong([strip.band.reason, strip.band.days].filter(Boolean).join('. '))], 20)] : [stateBandBlock(strip.band)],
     amountsBlock(strip.amounts, strip.facts),
     paragraphBlock(last, LARGE_SIZE, BOX_WIDTH - inset * 2),
-    paragraphBlock([strong(strip.terms[0]!), plain(` ${strip.terms.slice(1).join(' ')}`)], BODY_SIZE, BOX_WIDTH - inset * 2),
+    termsBlock(strip, BOX_WIDTH - inset * 2),
   ])
   const height = Math.max(HALF, body.height + 4)
   return {
@@ -65,6 +66,23 @@ function stripBlock(strip: LabelStrip): Block {
     draw: (canvas, top) => {
       body.draw(canvas, top)
       canvas.rule(0, top + height + BLOCK_GAP, BOX_WIDTH, top + height + BLOCK_GAP, 0.8, 4)
+    },
+  }
+}
+
+/** What a strip rests on; a vet's word is framed, a lapsed one white on black, as in the foot that is cut away. */
+function termsBlock({ terms, termsLook }: LabelStrip, width: number): Block {
+  const text = [strong(terms[0]!), plain(` ${terms.slice(1).join(' ')}`)]
+  if (termsLook === 'plain') return paragraphBlock(text, BODY_SIZE, width)
+  const isReversed = termsLook === 'reversed'
+  const lines = breakLines(text, BOX_WIDTH - 16, BODY_SIZE)
+  const height = linesHeight(lines, BODY_SIZE) + 5
+  return {
+    height: height + 2,
+    draw: (canvas, top) => {
+      if (isReversed) canvas.fill(0, top + 2, BOX_WIDTH, height)
+      else canvas.frame(0, top + 2, BOX_WIDTH, height, 1.6)
+      canvas.lines(8, top + 4.5, lines, BODY_SIZE, isReversed ? 'white' : 'black')
     },
   }
 }

@@ -17,6 +17,11 @@ const MOST_LOG_ROWS = 7
 
 export async function drawMixingCard(model: MixingCardModel, paper: Paper, info: DocumentInfo): Promise<Buffer> {
   const canvas = new Canvas(paper, info)
+  layOutMixingCard(model).draw(canvas)
+  return canvas.finish()
+}
+
+export function layOutMixingCard(model: MixingCardModel): PageFlow {
   const flow = new PageFlow(sheetFrame({ ...model, dates: '' }, () => null))
   const origin = paragraphBlock(model.origin, BODY_SIZE)
   flow.place(titleBlock(model))
@@ -39,8 +44,7 @@ export async function drawMixingCard(model: MixingCardModel, paper: Paper, info:
     pairs.forEach(pair => flow.placeWhole(pair))
   }
   flow.placeWhole(origin)
-  flow.draw(canvas)
-  return canvas.finish()
+  return flow
 }
 
 function titleBlock(model: MixingCardModel): Block {

@@ -3,7 +3,7 @@ import type { Paper } from '#shared/schemas/regimen'
 import { BOX_WIDTH, Canvas, linesHeight, millimetres, type DocumentInfo } from './canvas'
 import { amountsBlock } from './drawAmount'
 import { dayRowBlock, logHeadBlock, logRowBlock, spareRowBlock } from './drawLog'
-import { drawSign } from './drawSign'
+import { layOutSign } from './drawSign'
 import { PageFlow } from './pageFlow'
 import {
   BODY_SIZE, callsBlock, drawStateSign, drawTick, drawWriteIn, BLOCK_GAP, gapBlock, LARGE_SIZE, paragraphBlock, stack, stateBandBlock, WRITE_ROW, type Block,
@@ -17,9 +17,17 @@ import { daySpan, held } from './wording'
 /** @returns the file. */
 export async function drawSheet(model: SheetModel, paper: Paper, info: DocumentInfo): Promise<Buffer> {
   const canvas = new Canvas(paper, info)
-  if (model.notice?.state === 'do-not-feed') drawSign(canvas, model, model.notice)
-  else layOut(model).draw(canvas)
+  layOutSheet(model).draw(canvas)
   return canvas.finish()
+}
+
+/**
+ * The pages of a sheet, or the sign where the gate is shut.
+ *
+ * @param firstPage  number that its first page bears in the file.
+ */
+export function layOutSheet(model: SheetModel, firstPage = 1): PageFlow {
+  return model.notice?.state === 'do-not-feed' ? layOutSign(model, model.notice) : layOutDays(model, firstPage)
 }
 
 /** Fewer rows than this at the foot of a page are not worth splitting a long day for. */
@@ -29,9 +37,9 @@ const FEWEST_ROWS = 3
  * Today comes first with everything it needs, the stop box always at the foot of the first page. Boxes go where a page
  * would end early, or to the end. A day is split only when it is longer than a page.
  */
-function layOut(model: SheetModel): PageFlow {
+function layOutDays(model: SheetModel, firstPage: number): PageFlow {
   const stop = stopBlock(model.stop)
-  const reminder = reminderBlock(model.stop)
+  const reminder = reminderBlock(model.stop, firstPage)
   const flow = new PageFlow(sheetFrame(model, page => page === 0 ? stop : reminder))
   let boxes = model.boxes.length > 0 ? boxesBlock(model.boxes) : null
   const turnPage = () => {
@@ -68,7 +76,7 @@ function placeStretch(flow: PageFlow, stretch: Stretch, turnPage: () => void, is
   }
   const beginning = first.block.height > longest ? splitBeginning(stretch, first.day) : first.block
   const lead = isUnderNotice && flow.fits(amounts, head, beginning, spare) ? amounts : withBand
-  if (!flow.fits(lead, head, beginning, spare) && !flow.isFresh) turnPage()
+  if (flow.isFresh ? flow.isBetterNext(lead) : !flow.fits(lead, head, beginning, spare)) turnPage()
   flow.place(lead)
   let isOpen = false
   for (const { day, block } of days) {
@@ -262,9 +270,9 @@ function splitAt(heights: readonly number[]): number {
 }
 
 /** One line on later pages: the stop box is on the first. */
-function reminderBlock(stop: StopBox): Block {
+function reminderBlock(stop: StopBox, stopPage: number): Block {
   const call = stop.calls.find(line => line.phone)
-  const lines = breakLines([strong(`STOP & CALL signs: page 1. ${stop.last}`), ...call ? [plain(` ${call.role}:\u00A0`), strong(held(call.phone!))] : []], BOX_WIDTH, BODY_SIZE)
+  const lines = breakLines([strong(`STOP & CALL signs: page ${stopPage}. ${stop.last}`), ...call ? [plain(` ${call.role}:\u00A0`), strong(held(call.phone!))] : []], BOX_WIDTH, BODY_SIZE)
   const height = linesHeight(lines, BODY_SIZE) + 9
   return {
     height: height + 4,

@@ -1,5 +1,5 @@
 /** The full-page DO NOT FEED: clipped on top of everything else. It carries no amount of any kind. */
-import { BOX_WIDTH, linesHeight, millimetres, middleBaseline, type Canvas } from './canvas'
+import { BOX_WIDTH, linesHeight, millimetres, middleBaseline } from './canvas'
 import { PageFlow } from './pageFlow'
 import { callsBlock, drawWriteIn, BLOCK_GAP, gapBlock, LARGE_SIZE, paragraphBlock, stack, WRITE_ROW, type Block } from './pageParts'
 import type { Notice, SheetModel, StopBox } from './sheet'
@@ -12,9 +12,9 @@ const CHECK_HEADS = ['Time', 'Warmth (°C)', 'What you see', 'Checked by']
 const CHECK_COLUMNS = [36, 32, 76, 36].map(millimetres)
 const MOST_CHECK_ROWS = 7
 
-export function drawSign(canvas: Canvas, model: SheetModel, notice: Notice): void {
+export function layOutSign(model: SheetModel, notice: Notice): PageFlow {
   const flow = new PageFlow(sheetFrame(model, page => page === 0 ? callBlock(model.stop) : null))
-  flow.place(wordBlock(notice.word))
+  flow.placeWhole(wordBlock(notice.word))
   for (const reason of notice.reasons) {
     flow.placeWhole(stack([paragraphBlock([strong(reason.title)], 24), paragraphBlock(reason.message, LARGE_SIZE), gapBlock(8)]))
   }
@@ -24,12 +24,14 @@ export function drawSign(canvas: Canvas, model: SheetModel, notice: Notice): voi
     flow.place(head)
     for (let row = 0; row < MOST_CHECK_ROWS && flow.fits(emptyRowBlock(CHECK_COLUMNS)); row++) flow.place(emptyRowBlock(CHECK_COLUMNS))
   }
-  flow.draw(canvas)
+  return flow
 }
 
+const MOST_WORD_SIZE = 80
+
 /** The word across the whole width, white on black. */
-export function wordBlock(word: string): Block {
-  const size = Math.min(80, 80 * (BOX_WIDTH - 28) / textWidth(word, 80, 'bold'))
+export function wordBlock(word: string, most = MOST_WORD_SIZE): Block {
+  const size = Math.min(most, most * (BOX_WIDTH - 28) / textWidth(word, most, 'bold'))
   const height = size * 1.25
   return {
     height: height + 12,

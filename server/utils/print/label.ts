@@ -4,9 +4,10 @@
  */
 import type { Plan } from '#shared/types/plan'
 import { formatDay } from '#shared/utils/calendar'
-import { callLines, codedFrom, footOf, held, identityOf, NOT_APPROVED, NOT_SURE, type Amount, type CallLine, type Coded, type FootLines, type Identity } from './wording'
+import { approvalInWords, approvalOn, callLines, codedFrom, ended, footOf, held, identityOf, NOT_SURE, type Amount, type ApprovalLines, type CallLine, type Coded, type FootLines, type Identity } from './wording'
 import { chosenDays, type PrintOptions } from './options'
 import { refuseIncomplete } from './refusal'
+import { plainTextOf } from './richText'
 import { heldToWeight, STATE_WORDS, stretchesOf, type StateBand, type Stretch } from './sheet'
 
 export interface LabelStrip {
@@ -15,8 +16,9 @@ export interface LabelStrip {
   band: StateBand
   amounts: Amount[]
   facts: string[]
-  /** Until when it counts, and that nobody approved it. */
+  /** Whether a vet approved it and until when it counts: the foot of the page is cut away. */
   terms: string[]
+  termsLook: 'plain' | 'framed' | 'reversed'
   last: string
   call: CallLine | null
 }
@@ -35,10 +37,12 @@ export function labelModel(plan: Plan, options: PrintOptions): LabelModel {
   refuseIncomplete(plan, days)
   const identity = identityOf(plan.animal)
   const coded = codedFrom(options)
+  const approval = approvalOn(options)
   const common = {
     identity,
     coded,
-    terms: [`${NOT_APPROVED}. Good until ${held(formatDay(plan.validity.goodUntil))}.`, coded.code ? `Sheet ${coded.code}, ${coded.version!.toLowerCase()}.` : coded.note],
+    termsLook: termsLookOf(approval),
+    terms: [termOf(approval, plan.validity.goodUntil), coded.code ? `Sheet ${coded.code}, ${coded.version!.toLowerCase()}.` : coded.note],
     last: NOT_SURE,
     call: callLines(options).find(line => line.phone !== null) ?? null,
   }
@@ -57,6 +61,18 @@ export function labelModel(plan: Plan, options: PrintOptions): LabelModel {
     note: 'Not on direct-thermal labels near heat lamps, disinfectant or plastic: they fade and darken. Laser print, matt.',
     foot: footOf(plan, options),
   }
+}
+
+/** The vet's word and until when it counts; that day is said once. */
+function termOf(approval: ApprovalLines, goodUntil: string): string {
+  const words = ended(plainTextOf(approvalInWords(approval)))
+  const day = held(formatDay(goodUntil))
+  return words.includes(day) ? words : `${words} Good until ${day}.`
+}
+
+/** A strip without any approval keeps its plain bold words; its page has the black band. */
+function termsLookOf({ state }: ApprovalLines): LabelStrip['termsLook'] {
+  return ({ none: 'plain', approved: 'framed', lapsed: 'reversed' } as const)[state]
 }
 
 /** Water of each day in one line; none where no volume is due. */

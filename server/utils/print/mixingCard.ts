@@ -39,7 +39,7 @@ export interface MixingCardModel {
 /** @throws SheetRefusedError when a pot lacks what to weigh, how much water or how warm. */
 export function mixingCardModel(plan: Plan, options: PrintOptions): MixingCardModel {
   const pots = potsOf(plan, options)
-  const missing = [...new Set(pots.flatMap(missingForPot))]
+  const missing = missingForMixing(plan, options)
   if (missing.length > 0) throw new SheetRefusedError(missing)
   const identity = identityOf(plan.animal)
   const shut = plan.gate.state === 'do-not-feed'
@@ -69,6 +69,11 @@ function potsOf(plan: Plan, options: PrintOptions): PlanMixing[] {
   const dates = chosenDays(plan.days, options).map(day => day.date)
   const asked = plan.mixing.filter(pot => dates.some(date => date >= pot.fromDate && date <= pot.toDate))
   return asked.length > 0 ? asked : plan.mixing
+}
+
+/** @returns what the pots lack, in plain words; empty when the card may be printed. */
+export function missingForMixing(plan: Plan, options: PrintOptions): string[] {
+  return [...new Set(potsOf(plan, options).flatMap(missingForPot))]
 }
 
 function missingForPot(pot: PlanMixing): string[] {

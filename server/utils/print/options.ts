@@ -1,4 +1,5 @@
 import type { Paper } from '#shared/schemas/regimen'
+import type { Standing } from '#shared/types/planLife'
 
 /** The saved plan a sheet belongs to. */
 export interface PrintReference {
@@ -22,6 +23,10 @@ export interface PrintOptions {
   reference?: PrintReference | null
   contacts?: PrintContact[]
   teamName?: string
+  /** Whether a vet's approval holds for this version; nobody approved it when absent. */
+  approval?: Standing
+  /** What the life of the plan has to say before anything else: "This plan was stopped on Thu 3 Dec. Do not use this sheet." */
+  lifeNote?: string
   appVersion: string
   /** Instant of printing, ISO 8601. */
   madeAt: string

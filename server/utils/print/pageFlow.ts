@@ -10,6 +10,7 @@ export interface PageFrame {
   head: (page: number) => Block
   /** What stands at the bottom of a page above its foot, or null. */
   bottom: (page: number) => Block | null
+  /** @param page  counted from 0 through the whole file. */
   foot: (page: number, pages: number) => Block
 }
 
@@ -59,15 +60,21 @@ export class PageFlow {
 
   /** Places a block here or, when it does not fit, on the next page. */
   placeWhole(block: Block): void {
-    if (!this.fits(block) && !this.isFresh) this.newPage()
+    if (this.isBetterNext(block)) this.newPage()
     this.place(block)
   }
 
-  draw(canvas: Canvas): void {
+  /** Whether a block that does not fit here has more room on the next page: a first page with a tall head and foot may hold little. */
+  isBetterNext(block: Block): boolean {
+    return !this.fits(block) && (!this.isFresh || this.roomOn(this.page + 1) > this.remaining + 0.01)
+  }
+
+  /** @param before  pages of the same file before these; `of` counts all of them. */
+  draw(canvas: Canvas, before = 0, of = this.pages.length): void {
     this.pages.forEach((placed, page) => {
       canvas.addPage()
       for (const { block, top } of placed) block.draw(canvas, top)
-      const foot = this.frame.foot(page, this.pages.length)
+      const foot = this.frame.foot(page + before, of)
       const bottom = this.frame.bottom(page)
       foot.draw(canvas, BOX_HEIGHT - foot.height)
       bottom?.draw(canvas, BOX_HEIGHT - foot.height - bottom.height)

@@ -4,7 +4,7 @@ import { drawCode } from './drawCode'
 import type { StateBand } from './sheet'
 import { plain, strong, type RichText, type Run } from './richText'
 import { breakLines, textWidth } from './shaping'
-import type { CallLine, Coded, FootLines, Identity } from './wording'
+import { haltsOf, type CallLine, type Coded, type FootLines, type Identity } from './wording'
 
 export interface Block {
   height: number
@@ -93,13 +93,18 @@ function identifierBlock(identity: Identity, width: number): Block {
   return shares || named.length === 0 ? row : stack([printed, row])
 }
 
-function supersededBlock(text: string): Block {
-  const height = millimetres(9)
+const HALT_SIZE = 15
+
+/** Why not to use this paper, white on black, above everything else. */
+function haltBlock(text: string): Block {
+  const lines = breakLines([strong(text)], BOX_WIDTH - 24, HALT_SIZE)
+  const height = Math.max(millimetres(9), linesHeight(lines, HALT_SIZE) + 6)
   return {
     height: height + 4,
     draw: (canvas, top) => {
       canvas.fill(0, top, BOX_WIDTH, height)
-      canvas.text(BOX_WIDTH / 2, middleBaseline(top, height, 15), text, { size: 15, weight: 'bold', tone: 'white', align: 'center' })
+      const first = top + (height - linesHeight(lines, HALT_SIZE)) / 2
+      lines.forEach((line, index) => canvas.lines((BOX_WIDTH - line.width) / 2, first + linesHeight(lines.slice(0, index), HALT_SIZE), [line], HALT_SIZE, 'white'))
     },
   }
 }
@@ -151,7 +156,7 @@ export function headBlock(identity: Identity, dates: string, coded: Coded): Bloc
     },
   }
   return stack([
-    ...coded.superseded ? [supersededBlock(coded.superseded)] : [],
+    ...haltsOf(coded).map(haltBlock),
     upper,
     ...dates ? [paragraphBlock(dates, LARGE_SIZE)] : [],
     { height: 12, draw: (canvas, top) => canvas.fill(0, top + 2, BOX_WIDTH, 4) },
@@ -169,7 +174,7 @@ export function shortHeadBlock(identity: Identity, coded: Coded): Block {
   const nameHeight = linesHeight(name, size)
   const height = nameHeight + linesHeight(second, BODY_SIZE)
   return stack([
-    ...coded.superseded ? [supersededBlock(coded.superseded)] : [],
+    ...haltsOf(coded).map(haltBlock),
     {
       height: height + 6,
       draw: (canvas, top) => {
@@ -186,21 +191,42 @@ export function shortHeadBlock(identity: Identity, coded: Coded): Block {
 
 const FOOT_BAND = millimetres(7.5)
 
-/** The foot of every page: the reversed band, then two lines. */
+/** Widths of the words of a foot's band when they share its row with a long name, as shares of the row. */
+const BAND_SHARES = [0.34, 0.42, 0.5, 0.58]
+const BAND_INSET = 12
+const BETWEEN = 14
+/** No sheet has more pages than this writes: a name breaks at the same place on all of them. */
+const WIDEST_PAGE_TEXT = 'page 88 of 88'
+
+/** The words of the band and whose sheet it is, side by side, at the widths that make them lowest. */
+function bandLines({ band, animal }: FootLines) {
+  const row = BOX_WIDTH - BAND_INSET * 2
+  const room = row - 16 - textWidth(WIDEST_PAGE_TEXT, BODY_SIZE, 'bold') - BETWEEN
+  const natural = textWidth(band, LARGE_SIZE, 'bold')
+  const sharing = BAND_SHARES.map(share => share * row)
+  const choices = [...natural <= sharing.at(-1)! ? [natural + 0.01] : [], ...sharing].map((width) => {
+    const words = breakLines([strong(band)], width, LARGE_SIZE)
+    const owner = breakLines([strong(animal)], room - Math.max(...words.map(line => line.width)), BODY_SIZE)
+    return { words, owner, height: Math.max(FOOT_BAND, linesHeight(words, LARGE_SIZE) + (words.length === 1 ? 3 : 8), linesHeight(owner, BODY_SIZE) + 6) }
+  })
+  return choices.reduce((best, one) => one.height < best.height - 0.01 ? one : best)
+}
+
+/** The foot of every page: the band, framed where a vet's approval stands and white on black where not, then its lines. */
 export function footBlock(foot: FootLines, page: number, pages: number, extra = ''): Block {
   const paragraphs = foot.lines.map((line, index) => breakLines(index === foot.lines.length - 1 && extra ? [...line, plain(` ${extra}`)] : line, BOX_WIDTH, BODY_SIZE))
   const pageText = `page ${page} of ${pages}`
-  const room = BOX_WIDTH - 24 - textWidth(foot.band, LARGE_SIZE, 'bold') - 16
-  const owner = breakLines([strong(foot.animal)], room - textWidth(pageText, BODY_SIZE, 'bold') - 14, BODY_SIZE)
-  const bandHeight = Math.max(FOOT_BAND, linesHeight(owner, BODY_SIZE) + 6)
+  const { words, owner, height: bandHeight } = bandLines(foot)
+  const tone = foot.isReversed ? 'white' : 'black'
   return {
     height: bandHeight + 4 + paragraphs.reduce((sum, lines) => sum + linesHeight(lines, BODY_SIZE), 0),
     draw: (canvas, top) => {
-      canvas.fill(0, top, BOX_WIDTH, bandHeight)
-      canvas.text(12, middleBaseline(top, bandHeight, LARGE_SIZE), foot.band, { size: LARGE_SIZE, weight: 'bold', tone: 'white' })
-      canvas.text(BOX_WIDTH - 12, middleBaseline(top, bandHeight, BODY_SIZE), pageText, { size: BODY_SIZE, weight: 'bold', tone: 'white', align: 'right' })
+      if (foot.isReversed) canvas.fill(0, top, BOX_WIDTH, bandHeight)
+      else canvas.frame(0, top, BOX_WIDTH, bandHeight, 1.6)
+      canvas.lines(BAND_INSET, top + (bandHeight - linesHeight(words, LARGE_SIZE)) / 2, words, LARGE_SIZE, tone)
+      canvas.text(BOX_WIDTH - BAND_INSET, middleBaseline(top, bandHeight, BODY_SIZE), pageText, { size: BODY_SIZE, weight: 'bold', tone, align: 'right' })
       const ownerWidth = Math.max(...owner.map(line => line.width))
-      canvas.lines(BOX_WIDTH - 12 - textWidth(pageText, BODY_SIZE, 'bold') - 14 - ownerWidth, top + (bandHeight - linesHeight(owner, BODY_SIZE)) / 2, owner, BODY_SIZE, 'white')
+      canvas.lines(BOX_WIDTH - BAND_INSET - textWidth(pageText, BODY_SIZE, 'bold') - BETWEEN - ownerWidth, top + (bandHeight - linesHeight(owner, BODY_SIZE)) / 2, owner, BODY_SIZE, tone)
       let y = top + bandHeight + 4
       for (const lines of paragraphs) y += canvas.lines(0, y, lines, BODY_SIZE)
     },
@@ -247,23 +273,28 @@ export function drawStateSign(canvas: Canvas, state: StateBand['state'], x: numb
   }
 }
 
-/** Who to ring, two to a row; a missing number is a line wide enough to write one on. */
-export function callsBlock(calls: readonly CallLine[], left: number, width: number): Block {
+const USUAL_CALL_SIZES = { name: BODY_SIZE, phone: 17 }
+
+/** Who to ring, two to a row; a missing number is a line wide enough to write one on, a long one takes two lines. */
+export function callsBlock(calls: readonly CallLine[], left: number, width: number, sizes = USUAL_CALL_SIZES): Block {
   const each = width / 2
   const cells = calls.map((call) => {
     const text: Run[] = [plain(`${call.role}: `), ...call.name ? [strong(`${call.name} `)] : []]
-    const lines = breakLines(text, each - 10, BODY_SIZE)
-    return { call, lines, height: call.phone ? linesHeight(lines, BODY_SIZE) + 20 : linesHeight(lines, BODY_SIZE) + WRITE_ROW - BODY_SIZE }
+    const lines = breakLines(text, each - 10, sizes.name)
+    const phone = call.phone ? breakLines([strong(call.phone)], each - 10, sizes.phone) : []
+    const under = call.phone ? linesHeight(phone.slice(1), sizes.phone) + sizes.phone + 3 : WRITE_ROW - BODY_SIZE
+    return { lines, phone, height: linesHeight(lines, sizes.name) + under }
   })
   const rows: typeof cells[] = []
   for (let i = 0; i < cells.length; i += 2) rows.push(cells.slice(i, i + 2))
   return stack(rows.map((row): Block => ({
     height: Math.max(...row.map(cell => cell.height)),
-    draw: (canvas, top) => row.forEach(({ call, lines, height }, index) => {
+    draw: (canvas, top) => row.forEach(({ lines, phone, height }, index) => {
       const x = left + index * each
-      canvas.lines(x, top, lines, BODY_SIZE)
-      const baseline = top + linesHeight(lines, BODY_SIZE)
-      if (call.phone) canvas.text(x, baseline + 14, call.phone, { size: 17, weight: 'bold' })
+      canvas.lines(x, top, lines, sizes.name)
+      const under = top + linesHeight(lines, sizes.name)
+      // Capitals and figures stand close below the name they belong to.
+      if (phone.length > 0) canvas.lines(x, under + 14 * sizes.phone / USUAL_CALL_SIZES.phone - firstBaseline(sizes.phone), phone, sizes.phone)
       else canvas.rule(x, top + height - 5, x + each - 14, top + height - 5, 0.8)
     }),
   })))

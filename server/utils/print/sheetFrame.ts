@@ -19,6 +19,6 @@ export function sheetFrame(model: Framed, bottom: PageFrame['bottom']): PageFram
   }
 }
 
-function lacksLetters({ identity, foot }: Framed): boolean {
-  return ![identity.name ?? '', identity.caseNumber ?? '', identity.enclosure ?? '', ...foot.lines.map(plainTextOf)].every(canPrint)
+function lacksLetters({ identity, coded, foot }: Framed): boolean {
+  return ![identity.name ?? '', identity.caseNumber ?? '', identity.enclosure ?? '', coded.lifeNote ?? '', foot.band, ...foot.lines.map(plainTextOf)].every(canPrint)
 }

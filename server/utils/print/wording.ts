@@ -1,5 +1,6 @@
 /** Turns of phrase that the sheet, the mixing card and the label share. They write what the plan says and work out nothing. */
 import type { Plan, PlanAnimal, PlanDay, PlanFeed, PlanMixing } from '#shared/types/plan'
+import type { Standing } from '#shared/types/planLife'
 import { formatClock, formatDay, formatDayAndYear, formatLongDay } from '#shared/utils/calendar'
 import { formatNumber, formatQuantity, formatRange, formatSignificant, formatTemperatureC, formatVolumeMl, formatWeightG, NBSP, volumeInWords } from '#shared/utils/quantity'
 import type { PrintOptions } from './options'
@@ -24,6 +25,13 @@ export function sentence(text: string): string {
 /** Number, unit and day name hold together: no line may end between them. */
 export function held(text: string): string {
   return text.replace(/ /g, NBSP)
+}
+
+const WRITTEN_DAY = /\b(?:Mon|Tue|Wed|Thu|Fri|Sat|Sun) \d{1,2} [A-Z][a-z]{2}\b(?: \d{4}\b)?|\d (?:g|kg)\b/g
+
+/** A sentence made elsewhere: no line may end inside its days and weights. */
+export function heldInside(text: string): string {
+  return text.replace(WRITTEN_DAY, held)
 }
 
 /** @example daySpan('2026-12-03', '2026-12-05') // 'Thu 3 to Sat 5 Dec' */
@@ -224,11 +232,14 @@ export interface Coded {
   note: string
   replaces: string | null
   superseded: string | null
+  /** That the plan was stopped, finished or moved. */
+  lifeNote: string | null
 }
 
-export function codedFrom(options: Pick<PrintOptions, 'reference'>): Coded {
+export function codedFrom(options: Pick<PrintOptions, 'reference' | 'lifeNote'>): Coded {
   const reference = options.reference ?? null
-  if (!reference) return { code: null, version: null, url: null, note: 'Not saved: this sheet has no code.', replaces: null, superseded: null }
+  const lifeNote = heldInside(options.lifeNote?.trim() ?? '') || null
+  if (!reference) return { code: null, version: null, url: null, note: 'Not saved: this sheet has no code.', replaces: null, superseded: null, lifeNote }
   const { id, version, latestVersion, url } = reference
   return {
     code: id,
@@ -237,20 +248,52 @@ export function codedFrom(options: Pick<PrintOptions, 'reference'>): Coded {
     note: 'Scan to see if this sheet is still current.',
     replaces: version > 1 ? `Replaces version ${version - 1}: bin it.` : null,
     superseded: latestVersion > version ? `SUPERSEDED. Version ${latestVersion} is newer: do not use this sheet.` : null,
+    lifeNote,
   }
 }
 
-export interface FootLines { band: string, animal: string, lines: Run[][] }
+/** Why this paper is not to be used, worst first; empty for paper that may be. */
+export function haltsOf(coded: Coded): string[] {
+  return [coded.lifeNote, coded.superseded].filter(text => text !== null)
+}
 
-/** The foot of every page: what it rests on, until when, which version, made when. */
+/** A vet's word on a plan. Whatever is not a standing approval is said white on black. */
+export interface ApprovalLines {
+  state: Standing['state']
+  band: string
+  /** Who, when, for which weight and until when, or why it lapsed; null where there never was one. */
+  line: string | null
+}
+
+export function approvalOn(options: Pick<PrintOptions, 'approval'>): ApprovalLines {
+  const { state, band, line }: Standing = options.approval ?? { state: 'none', band: '', line: '' }
+  // The words that nobody approved it are ours: no caller can soften them.
+  if (state === 'none') return { state, band: NOT_APPROVED, line: null }
+  return { state, band: band.trim(), line: heldInside(line.trim()) || null }
+}
+
+/** The band and its line as one text, for paper without room for both; who approved it is named once. */
+export function approvalInWords({ band, line }: ApprovalLines): Run[] {
+  if (line === null) return [strong(band)]
+  if (line.startsWith(band)) return [strong(band), plain(ended(line.slice(band.length)))]
+  return [strong(ended(band)), plain(` ${ended(line)}`)]
+}
+
+export interface FootLines { band: string, isReversed: boolean, animal: string, lines: Run[][] }
+
+/** The foot of every page: whether it is approved, what it rests on, until when, which version, made when. */
 export function footOf(plan: Plan, options: PrintOptions): FootLines {
   const { validity, animal } = plan
   const { code, version, replaces } = codedFrom(options)
   const identity = identityOf(animal)
+  const { state, band, line } = approvalOn(options)
+  const isReversed = state !== 'approved'
   return {
-    band: NOT_APPROVED,
+    band,
+    isReversed,
     animal: [identity.name ?? 'No name', identity.enclosure].filter(Boolean).join(', '),
     lines: [
+      ...line === null ? [] : [[isReversed ? strong(line) : plain(line)]],
       [plain(`Worked out from ${identity.weight}. `), strong(`Good until ${held(formatDay(validity.goodUntil))}.`), plain(` Next weigh-in ${held(formatDay(validity.nextWeighInOn))}.`)],
       [plain(code === null ? 'Not saved, no code. ' : `Sheet ${code}, ${version!.toLowerCase()}. `), ...replaces ? [strong(`${replaces} `)] : [], plain([`Made ${whenInWords(options.madeAt, plan.timeZone)}.`, options.teamName?.trim()].filter(Boolean).join(' '))],
     ],

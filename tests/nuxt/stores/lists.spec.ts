@@ -12,7 +12,10 @@ registerEndpoint('/api/reference/species', () => {
   if (down) throw createError({ statusCode: 500 })
   return { edition: '2026-12', items: [{ id: 'sp-leopard-gecko', commonName: 'Leopard gecko' }, { id: 'sp-corn-snake', commonName: 'Corn snake' }] }
 })
-registerEndpoint('/api/regimens', () => ({ items: [{ id: 'abc', version: 1 }] }))
+registerEndpoint('/api/regimens', event => getQuery(event).of === 'browser' ? { items: [{ id: 'abc', version: 1 }] } : { items: [] })
+registerEndpoint('/api/regimens/abc/take', { method: 'POST', handler: () => ({ id: 'team1' }) })
+registerEndpoint('/api/regimens/abc/check', { method: 'POST', handler: () => ({ state: 'checked' }) })
+registerEndpoint('/api/sheets/abc', event => ({ answer: getQuery(event), sheet: null, planId: null }))
 registerEndpoint('/api/regimens/abc', (event) => {
   const { key, version } = getQuery(event)
   if (key === 'wrong') throw createError({ statusCode: 404, data: { code: 'regimen.notFound', message: 'There is no plan behind this link.' } })
@@ -79,5 +82,24 @@ describe('the store of saved plans', () => {
     expect(regimens.problem).toMatchObject({ code: 'regimen.notFound' })
     await regimens.load('abc', 'k')
     expect(regimens.problem).toBeNull()
+  })
+
+  it('keeps the plan on the screen and its life together', async () => {
+    const regimens = useRegimensStore()
+    await regimens.load('abc', null)
+    await regimens.takeStep('abc', 'check', { version: 3, note: '' })
+    expect(regimens.saved).toMatchObject({ version: 3, team: { state: 'checked' } })
+    regimens.takeTeam('other', { state: 'stopped' } as never)
+    expect(regimens.saved!.team!.state).toBe('checked')
+  })
+
+  it('takes a guest\'s plan into the team', async () => expect(await useRegimensStore().takeIn('abc')).toBe('team1'))
+
+  it('looks a sheet up by its code, or by who asks', async () => {
+    const regimens = useRegimensStore()
+    await regimens.loadSheet('abc', 2, 'c0de')
+    expect(regimens.sheet!.answer).toEqual({ version: '2', code: 'c0de' })
+    await regimens.loadSheet('abc', null, null)
+    expect(regimens.sheet!.answer).toEqual({})
   })
 })

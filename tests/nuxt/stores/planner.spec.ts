@@ -2,13 +2,14 @@ import { registerEndpoint } from '@nuxt/test-utils/runtime'
 import { createError, readBody } from 'h3'
 import { createPinia, setActivePinia } from 'pinia'
 import { beforeEach, describe, expect, it } from 'vitest'
+import { TeamSettings } from '#shared/schemas/team'
 import type { Plan, SavedRegimen } from '#shared/types/plan'
 import { usePlannerStore } from '~/stores/planner'
 import { emptyDraft, type PlannerDraft } from '~/utils/plannerDraft'
 import { regimenInput } from '../../unit/plan/inputs'
 
 /** What the server was asked, and what it answers next. Its plans are told apart by their weight alone. */
-interface Asked { animal: { weightG: number, name?: string }, baseVersion?: number }
+interface Asked { animal: { weightG: number, name?: string }, baseVersion?: number, note?: string }
 let asked: Asked[] = []
 let answer: (body: Asked) => unknown = planOf
 
@@ -26,6 +27,7 @@ const handle = (method: 'POST' | 'PATCH') => ({
 registerEndpoint('/api/regimens/preview', handle('POST'))
 registerEndpoint('/api/regimens', handle('POST'))
 registerEndpoint('/api/regimens/abc', handle('PATCH'))
+registerEndpoint('/api/regimens/abc', { method: 'GET', handler: () => ({ id: 'abc', latestVersion: 5 }) })
 
 function filled(weight: string, change: Partial<PlannerDraft> = {}): PlannerDraft {
   return { ...emptyDraft(), speciesId: 'sp-leopard-gecko', weight: { text: weight, unit: 'g' }, dryness: '8', daysUnfed: '30', startAt: '2026-12-02T09:00', timeZone: 'Europe/London', ...change }
@@ -156,6 +158,51 @@ describe('save', () => {
     expect(planner.problem).toMatchObject({ code: 'regimen.changed' })
     expect(planner.editing).toMatchObject({ id: 'abc', version: 2 })
     expect(planner.draft.speciesId).toBe('sp-leopard-gecko')
+  })
+})
+
+describe('a team\'s plan', () => {
+  const saved = { id: 'abc', version: 2, latestVersion: 2, input: regimenInput(), plan: {} as Plan, team: {} } as unknown as SavedRegimen
+  it('is saved without a key', async () => {
+    answer = () => ({ id: 'abc', version: 1, key: '', link: '/plans/abc' })
+    planner.draft = filled('22')
+    expect(await planner.save()).toBe('/plans/abc')
+  })
+  it('takes along what was said of the change, once', async () => {
+    planner.change(saved, null)
+    expect(planner.editing).toMatchObject({ team: true })
+    planner.note = ' New weight. '
+    answer = () => ({ id: 'abc', version: 3 })
+    await planner.save()
+    expect(asked[0]!.note).toBe('New weight.')
+    expect(planner.note).toBe('')
+  })
+  it('that someone overtook can be saved as the version after it, once that is wanted', async () => {
+    planner.change(saved, null)
+    answer = body => body.baseVersion === 5 ? { id: 'abc', version: 6 } : refuse(409, { code: 'regimen.changed', message: 'Mara Linde saved version 5.', issues: [{ path: 'animal.weightG', message: 'Weight from 22 g to 23 g' }] })()
+    expect(await planner.save()).toBeNull()
+    expect(planner.problem?.issues).toHaveLength(1)
+    expect(await planner.saveOnTop()).toBe('/plans/abc')
+    expect(asked.map(one => one.baseVersion)).toEqual([2, 5])
+  })
+})
+
+describe('the settings of a team', () => {
+  const team = { id: 't', name: 'Saltings Rescue', role: 'keeper' as const, demo: true, codesDue: false, settings: TeamSettings.parse({ timeZone: 'Pacific/Auckland', feedingHours: { from: '06:00', to: '22:00' }, syringes: [{ capacityMl: 1, stepMl: 0.02 }], contacts: [{ role: 'Vet, by day', name: 'Dr Amara Osei', phone: '00 5550 0142' }] }) }
+  it('fill in the house of an empty form, and say so', () => {
+    planner.fillFromTeam(team)
+    expect(planner.draft).toMatchObject({ timeZone: 'Pacific/Auckland', from: '06:00', to: '22:00', teamName: 'Saltings Rescue', syringes: [{ capacity: '1', step: '0.02' }], contacts: [{ role: 'Vet, by day', name: 'Dr Amara Osei', phone: '00 5550 0142' }] })
+    expect(planner.filledFrom).toBe('Saltings Rescue')
+  })
+  it('leave alone what has begun, and keep what the team has not set', () => {
+    planner.draft = filled('22', { from: '08:00' })
+    planner.fillFromTeam(team)
+    expect(planner.draft.from).toBe('08:00')
+    expect(planner.filledFrom).toBe('')
+    planner.draft = emptyDraft()
+    planner.fillFromTeam({ ...team, settings: TeamSettings.parse({}) })
+    expect(planner.draft.syringes).toEqual(emptyDraft().syringes)
+    expect(planner.draft.contacts).toEqual(emptyDraft().contacts)
   })
 })
 

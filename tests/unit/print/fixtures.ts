@@ -1,6 +1,7 @@
 /** Plans written by hand, one for each thing that paper has to get right. No formula is run here. */
 import type { PrintOptions } from '../../../server/utils/print/options'
 import type { Plan, PlanDay, PlanFeed, PlanMixing, Syringe } from '#shared/types/plan'
+import type { Standing } from '#shared/types/planLife'
 
 const ONE_ML: Syringe = { capacityMl: 1, stepMl: 0.01 }
 
@@ -15,6 +16,34 @@ export const OPTIONS: PrintOptions = {
   appVersion: '0.1.0',
   madeAt: '2026-12-02T18:40:00Z',
 }
+
+export const APPROVED: Standing = {
+  state: 'approved',
+  band: 'Approved by Dr Amara Osei',
+  line: 'Approved by Dr Amara Osei (DEMO-0142), Wed 2 Dec 2026, 18:45: version 2, 182 g, until Wed 9 Dec.',
+}
+export const LAPSED: Standing = {
+  state: 'lapsed',
+  band: 'APPROVAL LAPSED',
+  line: 'Its weight was good until Wed 9 Dec. It was approved by Dr Amara Osei (DEMO-0142) on Wed 2 Dec 2026, 18:45.',
+}
+export const NONE: Standing = { state: 'none', band: 'NOT APPROVED BY A VET', line: 'No vet has approved this version.' }
+
+/** Name and registration as long as the form lets in. */
+const LONGEST_VET = 'Dr Amara Oluwaseun Željezna-Kornjača Osei-Đorđević-Čakovečka of the Old Saltings'
+export const LONGEST_APPROVED: Standing = {
+  state: 'approved',
+  band: `Approved by ${LONGEST_VET}`,
+  line: `Approved by ${LONGEST_VET} (REGISTER OF SALTINGS VETS, SECTION 4, ENTRY 000142, RENEWED 2026, BRANCH NORTH), Wed 2 Dec 2026, 18:45: version 12, 182 g, until Wed 9 Dec.`,
+}
+/** Four people, as long as the form lets them be. */
+export const LONGEST_CONTACTS = [
+  { role: 'Vet, by day, on Tuesdays and Thursdays only, else the next', name: 'Dr Amara Oluwaseun Željezna-Kornjača Osei-Đorđević-Čakovečka', phone: '00 5550 0142 extension 12345678 reception' },
+  { role: 'Foster lead', name: 'Mara Linde', phone: '00 5550 0177' },
+  { role: 'Out of hours', phone: '0055500199005550019900555001990055500199' },
+  { role: 'Night', name: 'Juno Vale' },
+]
+export const STOPPED = 'This plan was stopped on Thu 3 Dec. Do not use this sheet.'
 
 export function feedAt(date: string, localTime: string, volumeMl: number, syringe: Syringe = ONE_ML, draws = 1): PlanFeed {
   return { at: `${date}T${localTime}:00.000Z`, localTime, volumeMl, markMl: volumeMl / draws, draws, syringe, energyKcal: volumeMl * 0.6, toleranceMl: 0.02, toleranceFraction: 0.05, roundingFraction: 0.01 }

@@ -6,9 +6,9 @@ import { formatVolumeMl, volumeInWords } from '#shared/utils/quantity'
 import { labelPdf, mixingPdf, sheetPdf } from '../../../server/utils/print/index'
 import type { PrintOptions } from '../../../server/utils/print/options'
 import { beardedDragon, dayOn, feedAt, fromFirstDay, gecko, longestNames, NAMES, OPTIONS, shut, snake, sparrow } from './fixtures'
-import { collisions, plainOf, readPdf, type ReadFile, type ReadPage } from './readPdf'
+import { expectInsideMargins, PT_PER_MM } from './pageChecks'
+import { collisions, plainOf, readPdf, type ReadFile } from './readPdf'
 
-const PT_PER_MM = 72 / 25.4
 const PRINTS = { sheet: sheetPdf, mixing: mixingPdf, label: labelPdf }
 
 const cases: [string, Plan, Partial<PrintOptions>][] = [
@@ -48,17 +48,6 @@ describe.each(Object.keys(PRINTS) as (keyof typeof PRINTS)[])('every %s', (kind)
     })
   })
 })
-
-/** 15 mm at the top and the sides, and nothing in the outer 10 mm below. */
-function expectInsideMargins(page: ReadPage) {
-  const drawn = [...page.texts, ...page.shapes]
-  const tolerance = 0.1
-  expect(drawn.length).toBeGreaterThan(10)
-  expect(Math.min(...drawn.map(one => one.left))).toBeGreaterThanOrEqual(15 * PT_PER_MM - tolerance)
-  expect(Math.min(...drawn.map(one => one.top))).toBeGreaterThanOrEqual(15 * PT_PER_MM - tolerance)
-  expect(page.width - Math.max(...drawn.map(one => one.right))).toBeGreaterThanOrEqual(15 * PT_PER_MM - tolerance)
-  expect(page.height - Math.max(...drawn.map(one => one.bottom))).toBeGreaterThanOrEqual(10 * PT_PER_MM)
-}
 
 describe('the numbers on a sheet', () => {
   it.each(cases.filter(([name]) => !['shut gate', 'weight out of date'].includes(name)))('are the plan\'s: %s', async (_, plan, options) => {

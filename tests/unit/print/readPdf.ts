@@ -4,7 +4,7 @@ import { getDocument, OPS } from 'pdfjs-dist/legacy/build/pdf.mjs'
 export interface Box { left: number, top: number, right: number, bottom: number }
 export interface PlacedText extends Box { text: string, size: number }
 /** A path with the closed parts it is made of. */
-export interface Shape extends Box { parts: Box[] }
+export interface Shape extends Box { parts: Box[], isFilled: boolean }
 export interface ReadPage {
   width: number
   height: number
@@ -56,7 +56,7 @@ async function shapesOf(page: { getOperatorList: () => Promise<{ fnArray: number
     // Lines end where they end: a level one is thick upwards and downwards only.
     const wide = top === bottom ? 0 : half
     const high = left === right ? 0 : half
-    boxes.push({ left: left! - wide, top: top! - high, right: right! + wide, bottom: bottom! + high, parts: partsOf([...(values[1] as Float32Array[])[0]!]) })
+    boxes.push({ left: left! - wide, top: top! - high, right: right! + wide, bottom: bottom! + high, parts: partsOf([...(values[1] as Float32Array[])[0]!]), isFilled: values[0] === OPS.fill })
   })
   return boxes
 }

@@ -177,7 +177,7 @@ describe('what a sheet rests on', () => {
 
   it('says so when the plan was not saved', () => {
     const model = sheetModel(beardedDragon(), { ...OPTIONS, reference: null, teamName: undefined })
-    expect(model.coded).toEqual({ code: null, version: null, url: null, note: 'Not saved: this sheet has no code.', replaces: null, superseded: null })
+    expect(model.coded).toEqual({ code: null, version: null, url: null, note: 'Not saved: this sheet has no code.', replaces: null, superseded: null, lifeNote: null })
     expect(foot(model)[1]).toBe('Not saved, no code. Made Wed 2 Dec 2026, 18:40.')
   })
 
