@@ -27,7 +27,7 @@ export default defineNuxtConfig({
 
   // File names carry the feature already: components/plan/PlanBarrel.vue is <PlanBarrel>.
   components: [{ path: '~/components', pathPrefix: false }],
-  // Nobody signs in yet: no page needs the session, and asking for it would cost a request for each.
+  // Who is signed in is asked for by our own store: the module's would tell no more than an id.
   auth: { loadStrategy: 'none' },
   tailwindcss: { cssPath: ['~/assets/css/main.css', { injectPosition: 'first' }], viewer: false },
 
@@ -36,7 +36,11 @@ export default defineNuxtConfig({
     rateLimitFactor: 1,
     // The password is made on first start (server/plugins/00.secret.ts). The cookie says only which plans this browser knows;
     // each link in it ends after 30 days by itself. Secure is set where the request came by https (guestPlans.ts).
-    session: { name: 'thimbleful', password: '', maxAge: 60 * 60 * 24 * 365, cookie: { sameSite: 'lax', httpOnly: true, secure: false } },
+    session: { name: 'thimbleful', sessionHeader: false, password: '', maxAge: 60 * 60 * 24 * 365, cookie: { sameSite: 'lax', httpOnly: true, secure: false } },
+    // Where people reach this server, for links in mails: https://plans.rescue.example. Must be set once mail leaves the house.
+    origin: '',
+    // Mail leaves only when a server is set: NUXT_SMTP_URL, NUXT_SMTP_FROM, NUXT_SMTP_RETRY_SECONDS.
+    smtp: { url: '', from: '', retrySeconds: 60 },
     public: { appVersion: packageInfo.version },
   },
 
@@ -81,6 +85,8 @@ export default defineNuxtConfig({
   hooks: {
     // Ours answers for /api and leaves the rest to Nuxt's, which shows error.vue. Set in the configuration it would replace Nuxt's.
     'nitro:config'(config) {
+      // The cookie is read through requireMember and ended through sign-out; the module's own addresses would go around both.
+      config.handlers = config.handlers?.filter(one => one.route !== '/api/_auth/session')
       config.errorHandler = [resolve(config.rootDir ?? '.', 'server/error.ts'), ...[config.errorHandler ?? []].flat()]
     },
     // Migrations and print fonts are read from disk: beside the built server, and in the sources while developing.

@@ -1,5 +1,5 @@
 import type { SavedRegimen } from '#shared/types/plan'
-import type { PlanStep, TeamPlanInfo } from '#shared/types/planLife'
+import type { LifeStep, TeamPlanInfo } from '#shared/types/planLife'
 import type { SheetLook } from '#shared/types/sheet'
 import { apiProblemOf, type ApiProblem } from '~/utils/apiError'
 
@@ -48,7 +48,7 @@ export const useRegimensStore = defineStore('regimens', () => {
   function takeTeam(id: string, team: TeamPlanInfo) {
     if (saved.value?.id === id) saved.value = { ...saved.value, team }
   }
-  async function takeStep(id: string, step: PlanStep, body: { version: number, note?: string, reason?: string }) {
+  async function takeStep(id: string, step: LifeStep, body: { version: number, note?: string, reason?: string }) {
     takeTeam(id, await $fetch<TeamPlanInfo>(`/api/regimens/${id}/${step}`, { method: 'POST', body }))
   }
   /** A guest's plan of this browser becomes the team's. @returns its id there. */

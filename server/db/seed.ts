@@ -1,16 +1,15 @@
 import type { RegimenInput } from '#shared/schemas/regimen'
 import { newLinkKey } from '../utils/access/linkKey'
+import { GUEST } from '../utils/data/auditRows'
 import { insertRegimen } from '../utils/data/regimenRows'
 import { buildPlan } from '../utils/plan/buildPlan'
 import { currentEdition } from '../utils/reference'
 import type { Db } from './client'
 import { regimens } from './schema'
+import { CONTACTS, HOURS } from './seed.data'
 
-const HOURS = { from: '07:30', to: '20:30' }
-const CONTACTS = [{ role: 'Vet, by day', name: 'Dr Amara Osei', phone: '00 5550 0142' }, { role: 'Out of hours', phone: '00 5550 0199' }]
-
-/** Invented animals of an invented rescue. */
-const DEMO: { id: string, input: Omit<RegimenInput, 'startAt'> }[] = [
+/** Invented animals that anyone may look at, signed in or not. */
+const SHOWN: { id: string, input: Omit<RegimenInput, 'startAt'> }[] = [
   {
     id: 'demojuniper',
     input: {
@@ -41,10 +40,10 @@ const DEMO: { id: string, input: Omit<RegimenInput, 'startAt'> }[] = [
 export function seedDemo(db: Db, now = new Date()): boolean {
   if (db.select({ id: regimens.id }).from(regimens).limit(1).get()) return false
   const at = now.toISOString()
-  for (const { id, input } of DEMO) {
+  for (const { id, input } of SHOWN) {
     const whole: RegimenInput = { ...input, startAt: at }
     const { keyHash, linkExpiresAt } = newLinkKey(now)
-    insertRegimen(db, { id, keyHash, linkExpiresAt, demo: true, actor: 'demo', at, input: whole, plan: buildPlan(whole, currentEdition()) })
+    insertRegimen(db, { id, keyHash, linkExpiresAt, demo: true, actor: { ...GUEST, id: 'demo' }, at, input: whole, plan: buildPlan(whole, currentEdition()) })
   }
   return true
 }

@@ -1,18 +1,22 @@
 import { existsSync } from 'node:fs'
 import { dirname, resolve } from 'node:path'
 import { defineNitroPlugin } from 'nitropack/runtime'
-import { database } from '../db/client'
+import { database, dataFolder } from '../db/client'
 import { migrateDatabase } from '../db/migrate'
 import { seedDemo } from '../db/seed'
+import { seedTeam } from '../db/seedTeam'
+import { beginChain } from '../utils/data/auditRows'
 
 /** Open, migrate, check, or do not start. All of it is synchronous: Nitro does not wait for anything else. */
 export default defineNitroPlugin(() => {
   const db = database()
   const applied = migrateDatabase(db, migrationsFolder())
   if (applied > 0) console.info(`Database: ${applied} ${applied === 1 ? 'migration' : 'migrations'} applied.`)
+  beginChain(db, new Date().toISOString())
   if (process.env.NUXT_SEED_DEMO === 'false') return
   try {
-    if (seedDemo(db)) console.info('Database: demo plans of Saltings Rescue added.')
+    const [plans, team] = [seedDemo(db), seedTeam(db, dataFolder())]
+    if (plans || team) console.info('Database: the demonstration, Saltings Rescue, was added.')
   }
   catch (error) {
     // Real plans do not depend on the demo: a rescue must not stand before a closed door because of it.

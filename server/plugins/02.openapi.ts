@@ -1,25 +1,30 @@
 import { defineNitroPlugin } from 'nitropack/runtime'
 import { z } from 'zod'
-import { RegimenChange, RegimenInput } from '#shared/schemas/regimen'
+import * as auth from '#shared/schemas/auth'
+import * as planLife from '#shared/schemas/planLife'
+import * as regimen from '#shared/schemas/regimen'
+import * as team from '#shared/schemas/team'
 
-interface Operation { requestBody?: { content?: Record<string, unknown> } }
+interface Operation { requestBody?: { description?: string, content?: Record<string, unknown> } }
 interface OpenApiDocument { components?: { schemas?: Record<string, unknown> }, paths?: Record<string, Record<string, Operation>> }
 
 /**
  * Puts the shape of what may be sent into the generated OpenAPI document, from the schemas that check it: described by
- * hand it would drift from them.
+ * hand it would drift from them. A route names its schema in the description of its body.
  */
 export default defineNitroPlugin((nitroApp) => {
-  const schemas = { RegimenInput: jsonSchemaOf(RegimenInput), RegimenChange: jsonSchemaOf(RegimenChange) }
+  const known = Object.fromEntries(Object.entries({ ...auth, ...planLife, ...regimen, ...team }).flatMap(([name, schema]) => schema instanceof z.ZodType ? [[name, jsonSchemaOf(schema)]] : []))
   nitroApp.hooks.hook('beforeResponse', (event, response) => {
     if (event.path.split('?')[0] !== '/_openapi.json' || typeof response.body !== 'object') return
     const document = response.body as OpenApiDocument
-    document.components = { ...document.components, schemas: { ...document.components?.schemas, ...schemas } }
-    for (const operations of Object.values(document.paths ?? {})) {
-      for (const [method, { requestBody }] of Object.entries(operations)) {
-        if (requestBody) requestBody.content = { 'application/json': { schema: { $ref: `#/components/schemas/${method === 'patch' ? 'RegimenChange' : 'RegimenInput'}` } } }
-      }
+    const schemas: Record<string, unknown> = {}
+    for (const { requestBody } of Object.values(document.paths ?? {}).flatMap(operations => Object.values(operations))) {
+      const name = requestBody?.description ?? ''
+      if (!requestBody || !(name in known)) continue
+      schemas[name] = known[name]
+      requestBody.content = { 'application/json': { schema: { $ref: `#/components/schemas/${name}` } } }
     }
+    document.components = { ...document.components, schemas: { ...document.components?.schemas, ...schemas } }
   })
 })
 

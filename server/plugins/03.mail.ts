@@ -9,6 +9,7 @@ interface SmtpSettings { url: string, from: string, retrySeconds: number }
 export default defineNitroPlugin((nitroApp) => {
   const smtp = useRuntimeConfig().smtp as SmtpSettings | undefined
   if (!smtp?.url) return
+  if (!useRuntimeConfig().origin) throw new Error('Mail leaves this server, so NUXT_ORIGIN must say where people reach it, for example https://plans.rescue.example: links in mails begin with it.')
   const transport = transportOf(smtp.url, smtp.from)
   if (!transport) return
   const retrySeconds = Number(smtp.retrySeconds)

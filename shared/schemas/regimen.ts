@@ -85,7 +85,8 @@ export type RegimenInput = z.infer<typeof RegimenInput>
 export const SheetQuery = z.object({
   key: z.string().max(200).optional(),
   version: z.coerce.number().int().min(1).optional(),
-  paper: z.enum(PAPERS, { error: 'Paper is a4 or letter.' }).default('a4'),
+  /** Without one, what the team has set; else A4. */
+  paper: z.enum(PAPERS, { error: 'Paper is a4 or letter.' }).optional(),
   /** Days of the plan, counted from 1: "1-3" or "2". At most seven. */
   days: z.string().regex(/^\d{1,3}(-\d{1,3})?$/, 'Give the days as 1-3 or 2.').default('1-3'),
 })
@@ -94,6 +95,8 @@ export type SheetQuery = z.infer<typeof SheetQuery>
 /** A change of a saved plan: the whole input again, and the version it is based on. */
 export const RegimenChange = RegimenInput.extend({
   baseVersion: z.number({ error: 'The version this change is based on must be a whole number.' }).int('The version this change is based on must be a whole number.').min(1, 'Versions begin at 1.').optional(),
+  /** What was changed and why, in a sentence. */
+  note: text('the note', 300).optional(),
 })
 
 export const RegimenParams = z.object({ id: z.string().min(1).max(64) })

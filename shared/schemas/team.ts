@@ -65,9 +65,10 @@ export type HelperLinkInput = z.infer<typeof HelperLinkInput>
 
 export const HelperOpen = z.object({ token: Token, initials: text('your initials', 6).min(2, 'Give your initials: 2 to 6 letters.') })
 export const SheetParams = z.object({ id: RowId })
+/** The code from the paper; a member or a helper on a visit needs none, and sees the newest version without one. */
 export const SheetCodeQuery = z.object({
-  version: z.coerce.number({ error: 'The address of this sheet is incomplete. Scan its code again.' }).int().min(1),
-  code: z.string({ error: 'The address of this sheet is incomplete. Scan its code again.' }).max(64),
+  version: z.coerce.number({ error: 'The address of this sheet is incomplete. Scan its code again.' }).int().min(1).optional(),
+  code: z.string({ error: 'The address of this sheet is incomplete. Scan its code again.' }).max(64).optional(),
 })
 
 export const TransferInput = z.object({ days: number('how long the link is good for', 'days', 1, 30).default(7), note: text('the note', 500).default('') })
@@ -88,3 +89,5 @@ export const RecordQuery = listQuery(['at'], '-at').extend({
   caseNumber: text('the case number', 40).optional(),
   action: text('the action', 60).optional(),
 })
+export const MailParams = z.object({ id: z.coerce.number({ error: 'Mails are numbered.' }).int().min(1) })
+export const DeskQuery = z.object({ page: MembersQuery.shape.page, pageSize: MembersQuery.shape.pageSize })

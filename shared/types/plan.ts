@@ -313,6 +313,8 @@ export interface SavedRegimen {
   demo?: boolean
   input: import('../schemas/regimen').RegimenInput
   plan: Plan
+  /** Only for a member of the team that owns it. */
+  team?: import('./planLife').TeamPlanInfo
 }
 
 export interface SavedRegimenReceipt {

@@ -11,10 +11,10 @@ export const PLAN_STATE_LABELS: Record<PlanState, string> = {
 export const WAITS = ['check', 'approval'] as const
 export type Wait = (typeof WAITS)[number]
 
-export const PLAN_STEPS = ['ask-check', 'check', 'ask-approval', 'approve', 'send-back', 'use', 'finish', 'stop'] as const
-export type PlanStep = (typeof PLAN_STEPS)[number]
+export const LIFE_STEPS = ['ask-check', 'check', 'ask-approval', 'approve', 'send-back', 'use', 'finish', 'stop'] as const
+export type LifeStep = (typeof LIFE_STEPS)[number]
 
-export const PLAN_STEP_LABELS: Record<PlanStep, string> = {
+export const LIFE_STEP_LABELS: Record<LifeStep, string> = {
   'ask-check': 'Ask for a check', 'check': 'Mark as checked', 'ask-approval': 'Ask a vet to approve', 'approve': 'Approve this version',
   'send-back': 'Send back', 'use': 'Put in use', 'finish': 'Finish', 'stop': 'Stop this plan',
 }
@@ -60,9 +60,9 @@ export interface TeamPlanInfo {
   standing: Standing
   lastWeighIn: { weightG: number, weighedAt: string } | null
   /** Steps that this member may take now, in the order of buttons; others are not offered. */
-  steps: PlanStep[]
+  steps: LifeStep[]
   /** Why a step that the role has is not open now, for example that the drafter cannot check. */
-  notYet: Partial<Record<PlanStep, string>>
+  notYet: Partial<Record<LifeStep, string>>
   mayEdit: boolean
   mayWeigh: boolean
   mayTransfer: boolean
@@ -83,6 +83,7 @@ export interface PlanRow {
   state: PlanState
   waiting: Wait | null
   waitingSince: string | null
+  askedBy: string | null
   standing: Standing
   updatedAt: string
   updatedBy: string

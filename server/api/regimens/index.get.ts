@@ -1,20 +1,20 @@
-import type { Plan } from '#shared/types/plan'
+import { PlansQuery } from '#shared/schemas/planLife'
 import { guestPlansOf } from '#server/utils/access/guestPlans'
-import { isOpen } from '#server/utils/access/requireRegimen'
-import { database, findRegimen, findRegimenVersion } from '#server/utils/data'
+import { requireMember } from '#server/utils/access/requireMember'
+import { whoIs } from '#server/utils/access/signedIn'
+import { database, listRegimens } from '#server/utils/data'
+import { readQueryOf } from '#server/utils/http/readInput'
+import { rememberedPlans } from '#server/utils/regimen/rememberedPlans'
+import { planRow } from '#server/utils/regimen/teamPlan'
 
-defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'The plans this browser\'s sealed cookie remembers', responses: { 200: { description: '{ items: [{ id, version, animalName, speciesName, createdAt, linkExpiresAt }] }' } } } })
+defineRouteMeta({ openAPI: { tags: ['Plans'], summary: 'The plans of the team; signed out, or with of=browser, those this browser\'s sealed cookie remembers', parameters: [{ in: 'query', name: 'page' }, { in: 'query', name: 'pageSize' }, { in: 'query', name: 'sort' }, { in: 'query', name: 'q' }, { in: 'query', name: 'state' }, { in: 'query', name: 'waiting' }, { in: 'query', name: 'room' }, { in: 'query', name: 'of' }], responses: { 200: { description: 'Page of PlanRow; of a browser { items: [{ id, version, animalName, speciesName, createdAt, linkExpiresAt }] }' } } } })
 
 export default defineEventHandler(async (event) => {
-  const db = database()
-  const now = new Date()
-  const items = (await guestPlansOf(event)).flatMap(({ id, key }) => {
-    const row = findRegimen(db, id)
-    const newest = row && isOpen(row, key, now) ? findRegimenVersion(db, id, row.latestVersion) : undefined
-    if (!row || !newest) return []
-    const { animal } = JSON.parse(newest.planJson) as Plan
-    return [{ id, version: row.latestVersion, animalName: animal.name, speciesName: animal.speciesName, createdAt: newest.createdAt, linkExpiresAt: row.linkExpiresAt }]
-  })
+  const { of, ...asked } = readQueryOf(event, PlansQuery)
   setResponseHeader(event, 'cache-control', 'private, no-store')
-  return { items }
+  if (of === 'browser' || (of === undefined && !await whoIs(event))) return { items: rememberedPlans(await guestPlansOf(event)) }
+  const { teamId, settings } = await requireMember(event, 'plan.see')
+  const now = new Date()
+  const page = listRegimens(database(), teamId, asked)
+  return { ...page, items: page.items.map(one => planRow(one, settings.timeZone, now)) }
 })

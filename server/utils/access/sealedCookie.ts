@@ -6,11 +6,11 @@ export interface GuestPlan { id: string, key: string }
 export interface HelperVisit { link: string, initials: string }
 
 /** All that the sealed cookie holds: who, by id only, and which sign-in; what they may do is read from the database each time. */
-export interface CookieContent { user?: { id: string }, session?: string, plans?: GuestPlan[], help?: HelperVisit }
+export interface CookieContent { user?: { id: string }, session?: string, plans?: GuestPlan[], help?: HelperVisit, /** A secret of one-time codes until the first code confirms it. */ codes?: string }
 
 declare module '#auth-utils' {
   interface User { id: string }
-  interface SecureSessionData { session?: string, plans?: GuestPlan[], help?: HelperVisit }
+  interface SecureSessionData { session?: string, plans?: GuestPlan[], help?: HelperVisit, /** A secret of one-time codes until the first code confirms it. */ codes?: string }
 }
 
 /** What this browser's sealed cookie says; nothing for a browser without one. */

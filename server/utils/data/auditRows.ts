@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto'
-import { and, desc, eq, gt, inArray, like, sql, type SQL } from 'drizzle-orm'
+import { and, desc, eq, gt, gte, inArray, like, sql, type SQL } from 'drizzle-orm'
 import type { AuditRow } from '#shared/types/rows'
 import type { Page } from '#shared/types/team'
 import type { Db } from '../../db/client'
@@ -124,4 +124,9 @@ function recordWhere(db: Db, teamId: string, asked: RecordAsked): SQL | undefine
 export function listRecord(db: Db, teamId: string, asked: RecordAsked): Page<AuditRow> {
   const where = recordWhere(db, teamId, asked)
   return pageOf(db, auditRecords, where, asked, (limit, offset) => db.select().from(auditRecords).where(where).orderBy(...orderBy(asked.sort, { at: auditRecords.id }, auditRecords.id)).limit(limit).offset(offset).all(), row => row)
+}
+
+/** Whether something was written down of a plan since a moment: so that nobody is told twice. */
+export function wasToldSince(db: Db, regimenId: string, action: string, since: string): boolean {
+  return db.select({ id: auditRecords.id }).from(auditRecords).where(and(eq(auditRecords.objectType, 'regimen'), eq(auditRecords.objectId, regimenId), eq(auditRecords.action, action), gte(auditRecords.at, since))).limit(1).get() !== undefined
 }

@@ -87,8 +87,8 @@ export function insertTransfer(tx: Writer, row: typeof transfers.$inferInsert): 
 export function findOpenTransfer(db: Writer, tokenHash: string, now: string): TransferRecord | undefined {
   return db.select().from(transfers).where(and(eq(transfers.tokenHash, tokenHash), eq(transfers.state, 'open'), gt(transfers.expiresAt, now))).get()
 }
-export function declineTransfer(tx: Writer, id: string, at: string, by: string): void {
-  tx.update(transfers).set({ state: 'declined', decidedAt: at, decidedBy: by }).where(and(eq(transfers.id, id), eq(transfers.state, 'open'))).run()
+export function declineTransfer(tx: Writer, id: string, at: string, by: string, otherTeamId: string): void {
+  tx.update(transfers).set({ state: 'declined', decidedAt: at, decidedBy: by, otherTeamId }).where(and(eq(transfers.id, id), eq(transfers.state, 'open'))).run()
 }
 export function withdrawTransfer(tx: Writer, teamId: string, id: string, at: string, by: string): TransferRecord | undefined {
   return tx.update(transfers).set({ state: 'withdrawn', decidedAt: at, decidedBy: by }).where(and(eq(transfers.teamId, teamId), eq(transfers.id, id), eq(transfers.state, 'open'))).returning().get()

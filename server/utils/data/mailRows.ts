@@ -1,6 +1,8 @@
-import { and, asc, eq, inArray, lte, min } from 'drizzle-orm'
+import { and, asc, eq, inArray, like, lt, lte, min, sql } from 'drizzle-orm'
+import type { MailRow, Page } from '#shared/types/team'
 import type { Db } from '../../db/client'
 import { mails } from '../../db/schema'
+import { likePattern, orderBy, pageOf, type ListAsked } from './paging'
 import type { Writer } from './writing'
 
 export interface NewMail { teamId: string | null, to: string, kind: string, subject: string, text: string, html: string, at: string, /** Without one the mail is only kept. */ hasService: boolean }
@@ -46,4 +48,17 @@ export function retryMail(db: Writer, teamId: string, id: number, at: string): b
 /** When the next mail is due; null when none waits. */
 export function nextMailAt(db: Db): string | null {
   return db.select({ at: min(mails.nextAttemptAt) }).from(mails).where(eq(mails.state, 'waiting')).get()?.at ?? null
+}
+
+/** Mails of a team, newest first. What they say is shown only where they are invented: links in them open things. */
+export function listMails(db: Db, teamId: string, withText: boolean, asked: ListAsked & { state?: MailRecord['state'] }): Page<MailRow> {
+  const where = and(eq(mails.teamId, teamId), asked.state ? eq(mails.state, asked.state) : undefined, asked.q ? like(sql`lower(${mails.toAddress} || ' ' || ${mails.subject})`, sql`${likePattern(asked.q)} escape '\\'`) : undefined)
+  return pageOf(db, mails, where, asked,
+    (limit, offset) => db.select().from(mails).where(where).orderBy(...orderBy(asked.sort, { createdAt: mails.createdAt }, mails.id)).limit(limit).offset(offset).all(),
+    ({ id, toAddress, kind, subject, text, html, state, attempts, createdAt, sentAt, nextAttemptAt, problem }) => ({ id, to: toAddress, kind, subject, state, attempts, createdAt, sentAt, nextAttemptAt, problem, ...(withText && { text, html }) }))
+}
+
+/** What was kept or failed loses its text after a while: the links in it have ended, and nobody reads it any more. */
+export function emptyOldMails(db: Db, before: string): void {
+  db.update(mails).set({ text: '', html: '' }).where(and(inArray(mails.state, ['kept', 'failed']), lt(mails.createdAt, before))).run()
 }

@@ -113,8 +113,8 @@ export function countCoordinators(db: Writer, teamId: string): number {
   return db.select({ count: count() }).from(members).where(and(eq(members.teamId, teamId), eq(members.role, 'coordinator'), isNull(members.leftAt))).get()?.count ?? 0
 }
 /** Teams of a person, in the order of their names. */
-export function teamsOf(db: Writer, userId: string): (TeamChoice & { demo: boolean })[] {
-  return db.select({ id: teams.id, name: teams.name, role: members.role, demo: teams.demo }).from(members).innerJoin(teams, eq(teams.id, members.teamId)).where(and(eq(members.userId, userId), isNull(members.leftAt))).orderBy(asc(teams.name), asc(teams.id)).all()
+export function teamsOf(db: Writer, userId: string): (TeamChoice & { demo: boolean, timeZone: string })[] {
+  return db.select({ id: teams.id, name: teams.name, role: members.role, demo: teams.demo, timeZone: sql<string>`coalesce(json_extract(${teams.settingsJson}, '$.timeZone'), 'Etc/UTC')` }).from(members).innerJoin(teams, eq(teams.id, members.teamId)).where(and(eq(members.userId, userId), isNull(members.leftAt))).orderBy(asc(teams.name), asc(teams.id)).all()
 }
 /** People of a team with one of these roles. */
 export function membersWithRole(db: Writer, teamId: string, roles: readonly Role[]): { userId: string, name: string, email: string, role: Role }[] {

@@ -1,4 +1,4 @@
-import { and, count, desc, eq, isNull, like, lt, ne, sql, type SQL } from 'drizzle-orm'
+import { and, desc, eq, isNotNull, isNull, like, lt, ne, sql, type SQL } from 'drizzle-orm'
 import type { RegimenInput } from '#shared/schemas/regimen'
 import type { Plan } from '#shared/types/plan'
 import type { PlanState, Wait } from '#shared/types/planLife'
@@ -98,7 +98,7 @@ export function listRegimenVersions(db: Db, regimenId: string, asked: ListAsked)
   return pageOf(db, regimenVersions, where, asked, (limit, offset) => db.select().from(regimenVersions).where(where).orderBy(...orderBy(asked.sort, { version: regimenVersions.version }, regimenVersions.id)).limit(limit).offset(offset).all(), row => row)
 }
 
-export interface PlansAsked extends ListAsked { state?: PlanState, waiting?: Wait, room?: string }
+export interface PlansAsked extends ListAsked { state?: PlanState, waiting?: Wait, room?: string, notDraftedBy?: string }
 export interface ListedPlan { row: RegimenRow, approval: ApprovalRecord | null }
 
 /** The plans of a team. Those that were handed over are not among them. */
@@ -108,6 +108,7 @@ export function listRegimens(db: Db, teamId: string, asked: PlansAsked): Page<Li
     asked.state ? eq(regimens.state, asked.state) : undefined,
     asked.waiting ? eq(regimens.waiting, asked.waiting) : undefined,
     asked.room ? eq(regimens.room, asked.room) : undefined,
+    asked.notDraftedBy ? ne(regimens.draftedById, asked.notDraftedBy) : undefined,
     ...asked.q.split(/\s+/).filter(Boolean).map((word): SQL => like(regimens.searchText, sql`${likePattern(word)} escape '\\'`)),
   )
   const columns = { updatedAt: regimens.updatedAt, animalName: sql`lower(${regimens.animalName})`, enclosure: sql`lower(${regimens.enclosure})`, state: regimens.state, waitingSince: regimens.waitingSince, goodUntil: regimens.goodUntil }
@@ -119,8 +120,9 @@ export function listRooms(db: Db, teamId: string): string[] {
   return db.selectDistinct({ room: regimens.room }).from(regimens).where(and(eq(regimens.teamId, teamId), isNull(regimens.movedAt), ne(regimens.room, ''))).orderBy(regimens.room).limit(500).all().map(row => row.room)
 }
 
-export function countWaiting(db: Db, teamId: string, waiting: Wait): number {
-  return db.select({ count: count() }).from(regimens).where(and(eq(regimens.teamId, teamId), eq(regimens.waiting, waiting))).get()?.count ?? 0
+/** Plans of every team that have waited since before a moment: for what time brings about, not for a request. */
+export function regimensWaitingSince(db: Db, waiting: Wait, before: string): RegimenRow[] {
+  return db.select().from(regimens).where(and(eq(regimens.waiting, waiting), lt(regimens.waitingSince, before), isNull(regimens.endedAt), isNotNull(regimens.teamId))).all()
 }
 
 // ── Life ──────────────────────────────────────────────────────────────────────────────────────────────────────────

@@ -3,7 +3,7 @@ import type { ApiErrorData, Issue } from '#shared/types/error'
 import type { Finding } from '#shared/types/finding'
 
 /** Short ASCII words for the status line; a sentence or a unit there would arrive broken. */
-const STATUS_WORDS: Record<number, string> = { 400: 'Bad Request', 403: 'Forbidden', 404: 'Not Found', 405: 'Method Not Allowed', 409: 'Conflict', 413: 'Content Too Large', 422: 'Unprocessable Content', 429: 'Too Many Requests', 500: 'Internal Server Error' }
+const STATUS_WORDS: Record<number, string> = { 400: 'Bad Request', 401: 'Unauthorized', 403: 'Forbidden', 404: 'Not Found', 405: 'Method Not Allowed', 409: 'Conflict', 410: 'Gone', 413: 'Content Too Large', 422: 'Unprocessable Content', 429: 'Too Many Requests', 500: 'Internal Server Error' }
 
 /**
  * An error answer in the one shape of the API. Throw what it returns.

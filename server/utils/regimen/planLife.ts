@@ -1,5 +1,5 @@
 import type { Plan } from '#shared/types/plan'
-import { PLAN_STATE_LABELS, PLAN_STEPS, type PlanStep, type Standing } from '#shared/types/planLife'
+import { PLAN_STATE_LABELS, LIFE_STEPS, type LifeStep, type Standing } from '#shared/types/planLife'
 import type { ApprovalRecord, RegimenRow } from '#shared/types/rows'
 import { can, type Ability, type Role } from '#shared/utils/abilities'
 import { formatDay } from '#shared/utils/calendar'
@@ -25,10 +25,10 @@ export interface StepAsked {
   now: Date
 }
 
-/** Abilities of the steps; a step with two is open to either. */
-export const STEP_ABILITIES: Record<PlanStep, Ability[]> = {
-  'ask-check': ['plan.edit'], 'check': ['plan.check'], 'ask-approval': ['plan.edit'], 'approve': ['plan.approve'],
-  'send-back': ['plan.check', 'plan.approve'], 'use': ['plan.use'], 'finish': ['plan.use'], 'stop': ['plan.use'],
+/** The ability that each step asks for. */
+export const STEP_ABILITIES: Record<LifeStep, Ability> = {
+  'ask-check': 'plan.edit', 'check': 'plan.check', 'ask-approval': 'plan.edit', 'approve': 'plan.approve',
+  'send-back': 'plan.check', 'use': 'plan.use', 'finish': 'plan.use', 'stop': 'plan.use',
 }
 
 /**
@@ -38,7 +38,7 @@ export const STEP_ABILITIES: Record<PlanStep, Ability[]> = {
  * @param text  note, or the reason where the step asks for one.
  * @throws PlanStepError `plan.step` (not in this state, 409), `plan.sameHand` (403), `plan.noRegistration`, `plan.staleWeight`, `plan.needsApproval` (422).
  */
-export function decideStep(step: PlanStep, asked: StepAsked, text: string): LifeChange {
+export function decideStep(step: LifeStep, asked: StepAsked, text: string): LifeChange {
   const { row, plan, who, now } = asked
   const at = now.toISOString()
   const standing = standingNow(asked)
@@ -83,10 +83,10 @@ export function decideStep(step: PlanStep, asked: StepAsked, text: string): Life
 }
 
 /** Steps a person may take now, in the order of buttons, and why others of their role are not open yet. */
-export function openSteps(asked: StepAsked): { steps: PlanStep[], notYet: Partial<Record<PlanStep, string>> } {
-  const steps: PlanStep[] = []
-  const notYet: Partial<Record<PlanStep, string>> = {}
-  for (const step of PLAN_STEPS.filter(one => STEP_ABILITIES[one].some(ability => can(asked.who.role, ability)))) {
+export function openSteps(asked: StepAsked): { steps: LifeStep[], notYet: Partial<Record<LifeStep, string>> } {
+  const steps: LifeStep[] = []
+  const notYet: Partial<Record<LifeStep, string>> = {}
+  for (const step of LIFE_STEPS.filter(one => can(asked.who.role, STEP_ABILITIES[one]))) {
     try {
       decideStep(step, asked, 'asked only to know')
       steps.push(step)

@@ -2,8 +2,7 @@ import { RegimenParams, SheetQuery } from '#shared/schemas/regimen'
 import { requireRegimen } from '#server/utils/access/requireRegimen'
 import { limitRequests } from '#server/utils/http/limitRequests'
 import { readParamsOf, readQueryOf } from '#server/utils/http/readInput'
-import { sendPdf } from '#server/utils/regimen/sendPdf'
-import { versionOf } from '#server/utils/regimen/versionOf'
+import { sendSavedPdf } from '#server/utils/regimen/sendPdf'
 
 defineRouteMeta({ openAPI: { tags: ['Paper'], summary: 'The label strip with the syringe of a saved plan, as PDF', parameters: [{ in: 'path', name: 'id', required: true }, { in: 'query', name: 'key' }, { in: 'query', name: 'version' }, { in: 'query', name: 'paper' }, { in: 'query', name: 'days' }], responses: { 200: { description: 'application/pdf; never recalculated' }, 404: { description: 'No such plan, wrong key, or the link has ended' }, 422: { description: 'It would lack something a carer needs: data.issues' } } } })
 
@@ -11,7 +10,6 @@ export default defineEventHandler(async (event) => {
   await limitRequests(event, 'print', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
   const query = readQueryOf(event, SheetQuery)
-  const row = await requireRegimen(event, id, query.key, 'look')
-  const regimen = versionOf(row, query.version)
-  return sendPdf(event, 'label', { plan: regimen.plan, input: regimen.input, saved: { regimen, key: query.key } }, query)
+  const { row } = await requireRegimen(event, id, query.key, 'plan.print')
+  return sendSavedPdf(event, 'label', row, query)
 })
