@@ -1,6 +1,7 @@
 import { randomBytes, scryptSync } from 'node:crypto'
 import { existsSync, readFileSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
+import { desc, eq } from 'drizzle-orm'
 import type { RegimenInput } from '#shared/schemas/regimen'
 import { TeamSettings } from '#shared/schemas/team'
 import { newLinkKey, newRegimenId } from '../utils/access/linkKey'
@@ -12,7 +13,6 @@ import { decideStep } from '../utils/regimen/planLife'
 import type { Db } from './client'
 import { regimenVersions, teams } from './schema'
 import { CONTACTS, DEMO_PEOPLE, DEMO_PLANS, HOURS, type DemoPlan } from './seed.data'
-import { desc, eq } from 'drizzle-orm'
 
 const HOUR_MS = 3_600_000
 const ID = 'demosaltings'
@@ -24,9 +24,15 @@ const ID = 'demosaltings'
  */
 export function seedTeam(db: Db, folder: string, now = new Date()): boolean {
   if (db.select({ id: teams.id }).from(teams).limit(1).get()) return false
-  const at = now.toISOString()
   const passwordHash = hashOf(demoPassword(folder))
   const settings = TeamSettings.parse({ address: 'The Boathouse, Saltings Lane', feedingHours: HOURS, contacts: CONTACTS.slice(0, 1).map(one => ({ name: '', ...one })), ladder: CONTACTS.slice(1).map(one => ({ name: '', ...one })), syringes: [{ capacityMl: 0.5, stepMl: 0.01 }, { capacityMl: 1, stepMl: 0.01 }, { capacityMl: 3, stepMl: 0.1 }, { capacityMl: 10, stepMl: 0.5 }] })
+  // All of it or nothing: half a demonstration would be a puzzle.
+  db.transaction(() => addTeam(db, settings, passwordHash, now))
+  return true
+}
+
+function addTeam(db: Db, settings: TeamSettings, passwordHash: string, now: Date): void {
+  const at = now.toISOString()
   insertTeam(db, { id: ID, name: 'Saltings Rescue', settingsJson: JSON.stringify(settings), demo: true, createdAt: at })
   for (const { name, email, role, registration = '' } of DEMO_PEOPLE) {
     const id = `demo${email.split('@')[0]}`
@@ -34,7 +40,6 @@ export function seedTeam(db: Db, folder: string, now = new Date()): boolean {
     insertMember(db, { id: newRegimenId(), teamId: ID, userId: id, role, joinedAt: at })
   }
   for (const plan of DEMO_PLANS) seedPlan(db, plan, settings, now)
-  return true
 }
 
 function seedPlan(db: Db, { input, by, hoursAgo, steps }: DemoPlan, settings: TeamSettings, now: Date): void {

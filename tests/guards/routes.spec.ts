@@ -3,7 +3,7 @@ import { checkSkips, filesUnder, textOf } from './files'
 
 const routes = filesUnder('server/api', ['.ts'])
 
-/** Every route is open to guests in this release; what each lets them see is said here, so that a new route must be. */
+/** Routes that ask nobody who they are, each with its reason: a new route must be guarded, or stand here. */
 const PUBLIC: Record<string, string> = {
   'server/api/[...].ts': 'answers only that there is nothing at an address',
   'server/api/health.get.ts': 'says only that the server is up, and its edition',
@@ -16,20 +16,25 @@ const PUBLIC: Record<string, string> = {
   'server/api/regimens/sheet.pdf.post.ts': 'prints what was sent, nothing kept',
   'server/api/regimens/mixing.pdf.post.ts': 'prints what was sent, nothing kept',
   'server/api/regimens/label.pdf.post.ts': 'prints what was sent, nothing kept',
-  'server/api/regimens/index.post.ts': 'anyone may save a plan; only its key opens it',
-  'server/api/regimens/index.get.ts': 'lists only what this browser\'s sealed cookie remembers',
+  'server/api/auth/me.get.ts': 'says who is signed in, to themselves',
+  'server/api/auth/sign-out.post.ts': 'ends only the sign-in of this browser',
+  'server/api/help/close.post.ts': 'ends only the visit of this browser',
+  'server/api/sheets/[id].get.ts': 'lookAtSheet asks for membership, a visit or the code of the paper',
 }
+
+/** What guards a route: a member, somebody signed in, a plan's key, a helper's visit, or a counted try with a secret. */
+const GUARDS = /\b(requireMember|requireSignedIn|requireRegimen|requireTeamRegimen|requireVisit|takeAttempt)\(/
 
 describe('every route', () => {
   it('exists for each public entry, with a reason', () => expect(checkSkips(PUBLIC, routes)).toEqual([]))
 
-  it.each(routes)('%s is public for a reason, or asks for the plan\'s key', (path) => {
-    if (!(path in PUBLIC)) expect(textOf(path), 'call requireRegimen, or list it as public with a reason').toContain('requireRegimen(')
+  it.each(routes)('%s is public for a reason, or guarded', (path) => {
+    if (!(path in PUBLIC)) expect(textOf(path), 'call a guard of access/, or list it as public with a reason').toMatch(GUARDS)
   })
   it.each(routes)('%s is described in the OpenAPI document', path => expect(textOf(path)).toContain('defineRouteMeta('))
   it.each(routes.filter(path => /\.(post|put|patch)\.ts$/.test(path)))('%s reads its body through a schema', path => expect(textOf(path)).toContain('readBodyOf('))
   it.each(routes.filter(path => path.includes('[') && !path.includes('[...]')))('%s reads the parts of its address through a schema', path => expect(textOf(path)).toContain('readParamsOf('))
-  it.each(routes.filter(path => /\.(post|put|patch)\.ts$/.test(path)))('%s counts how often it is asked', path => expect(textOf(path)).toContain('limitRequests('))
+  it.each(routes.filter(path => /\.(post|put|patch|delete)\.ts$/.test(path)))('%s counts how often it is asked', path => expect(textOf(path)).toContain('limitRequests('))
   it.each(routes)('%s does not read input around the schemas', (path) => {
     expect(textOf(path)).not.toMatch(/\b(readBody|getQuery|getRouterParam|getRouterParams|readRawBody|readFormData)\(/)
   })

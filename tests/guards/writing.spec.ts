@@ -31,7 +31,7 @@ function stringsOf(code: string): string {
 
 const files = [
   ...filesUnder('pages', ['.vue']), ...filesUnder('components', ['.vue']), ...filesUnder('layouts', ['.vue']),
-  ...filesUnder('server/utils/plan', ['.ts']), ...filesUnder('server/utils/print', ['.ts']), ...filesUnder('shared', ['.ts']), ...filesUnder('utils', ['.ts']),
+  ...filesUnder('server/utils/plan', ['.ts']), ...filesUnder('server/utils/print', ['.ts']), ...filesUnder('server/utils/mail', ['.ts']), ...filesUnder('server/utils/regimen', ['.ts']), ...filesUnder('server/utils/team', ['.ts']), ...filesUnder('server/utils/access', ['.ts']), ...filesUnder('shared', ['.ts']), ...filesUnder('utils', ['.ts']),
 ]
 
 describe('what people read', () => {

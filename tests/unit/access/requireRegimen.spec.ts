@@ -3,7 +3,7 @@ import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vites
 import { migrateDatabase } from '../../../server/db/migrate'
 import { newLinkKey } from '../../../server/utils/access/linkKey'
 import { isOpen, opensRegimen, requireRegimen } from '../../../server/utils/access/requireRegimen'
-import { database, insertRegimen } from '../../../server/utils/data'
+import { database, GUEST, insertRegimen } from '../../../server/utils/data'
 import { buildPlan } from '../../../server/utils/plan/buildPlan'
 import { currentEdition } from '../../../server/utils/reference'
 import { MIGRATIONS, scratchFolder } from '../db/scratch'
@@ -24,7 +24,7 @@ beforeAll(() => {
   vi.stubGlobal('getUserSession', () => Promise.resolve({ secure: { plans: remembered } }))
   migrateDatabase(database(), MIGRATIONS)
   const plan = buildPlan(input, currentEdition())
-  const row = { actor: 'guest', at: new Date().toISOString(), input, plan }
+  const row = { actor: GUEST, at: new Date().toISOString(), input, plan }
   for (const [id, key] of Object.entries({ pebble, oak, old })) insertRegimen(database(), { id, ...key, ...row })
   insertRegimen(database(), { id: 'demo', ...demo, ...row, demo: true })
 })
@@ -38,13 +38,13 @@ beforeEach(() => {
   remembered = []
 })
 
-const event = (cookie?: string) => ({ node: { req: { headers: cookie ? { cookie } : {} } } }) as unknown as H3Event
+const event = (cookie?: string) => ({ context: {}, node: { req: { headers: cookie ? { cookie } : {} } } }) as unknown as H3Event
 const statusOf = (promise: Promise<unknown>) => promise.then(() => 200, (error: { statusCode: number }) => error.statusCode)
 
 describe('requireRegimen', () => {
   it('gives the row to the key of its link, to look and to change', async () => {
-    expect((await requireRegimen(event(), 'pebble', pebble.key, 'look')).id).toBe('pebble')
-    expect((await requireRegimen(event(), 'pebble', pebble.key, 'change')).id).toBe('pebble')
+    expect((await requireRegimen(event(), 'pebble', pebble.key, 'plan.see')).row.id).toBe('pebble')
+    expect((await requireRegimen(event(), 'pebble', pebble.key, 'plan.edit')).row.id).toBe('pebble')
   })
 
   it.each<[string, string, string | undefined]>([
@@ -56,27 +56,27 @@ describe('requireRegimen', () => {
     ['a link that has ended', 'old', old.key],
     ['no such plan', 'nobody', pebble.key],
   ])('refuses %s with one and the same answer', async (_what, id, key) => {
-    for (const purpose of ['look', 'change'] as const) {
+    for (const purpose of ['plan.see', 'plan.edit'] as const) {
       await expect(requireRegimen(event('thimbleful=sealed'), id, key, purpose)).rejects.toMatchObject({ statusCode: 404, data: { code: 'regimen.notFound', message: expect.stringContaining('no plan behind this link') as string } })
     }
   })
 
   it('gives the row to a browser that remembers it, but not when another key is shown', async () => {
     remembered = [{ id: 'pebble', key: pebble.key }]
-    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'pebble', undefined, 'look'))).toBe(200)
-    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'pebble', oak.key, 'look'))).toBe(404)
-    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'oak', undefined, 'look'))).toBe(404)
-    expect(await statusOf(requireRegimen(event(), 'pebble', undefined, 'look'))).toBe(404)
+    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'pebble', undefined, 'plan.see'))).toBe(200)
+    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'pebble', oak.key, 'plan.see'))).toBe(404)
+    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'oak', undefined, 'plan.see'))).toBe(404)
+    expect(await statusOf(requireRegimen(event(), 'pebble', undefined, 'plan.see'))).toBe(404)
   })
 
   it('forgets with the link: a remembered plan ends when its link ends', async () => {
     remembered = [{ id: 'old', key: old.key }]
-    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'old', undefined, 'look'))).toBe(404)
+    expect(await statusOf(requireRegimen(event('thimbleful=sealed'), 'old', undefined, 'plan.see'))).toBe(404)
   })
 
   it('shows a demo plan to anyone and lets nobody change it', async () => {
-    expect((await requireRegimen(event(), 'demo', undefined, 'look')).demo).toBe(true)
-    for (const key of [undefined, demo.key, pebble.key]) expect(await statusOf(requireRegimen(event(), 'demo', key, 'change'))).toBe(403)
+    expect((await requireRegimen(event(), 'demo', undefined, 'plan.see')).row.demo).toBe(true)
+    for (const key of [undefined, demo.key, pebble.key]) expect(await statusOf(requireRegimen(event(), 'demo', key, 'plan.edit'))).toBe(403)
   })
 })
 

@@ -1,5 +1,6 @@
 import { afterEach, beforeEach, describe, expect, it } from 'vitest'
 import { auditRecords, regimens, regimenVersions } from '../../../server/db/schema'
+import { GUEST } from '../../../server/utils/data/auditRows'
 import { findRegimen, findRegimenVersion, insertRegimen, insertRegimenVersion, RegimenChangedError } from '../../../server/utils/data/regimenRows'
 import { buildPlan } from '../../../server/utils/plan/buildPlan'
 import { currentEdition } from '../../../server/utils/reference'
@@ -8,7 +9,7 @@ import { regimenInput } from '../plan/inputs'
 
 const input = regimenInput()
 const plan = buildPlan(input, currentEdition())
-const row = { id: 'pebble', keyHash: 'hash', linkExpiresAt: '2027-01-01T00:00:00.000Z', actor: 'guest', at: '2026-12-02T09:00:00.000Z', input, plan }
+const row = { id: 'pebble', keyHash: 'hash', linkExpiresAt: '2027-01-01T00:00:00.000Z', actor: GUEST, at: '2026-12-02T09:00:00.000Z', input, plan }
 
 let scratch: ReturnType<typeof scratchDatabase>
 beforeEach(() => {
@@ -45,7 +46,7 @@ describe('insertRegimen', () => {
 })
 
 describe('insertRegimenVersion', () => {
-  const change = { id: 'pebble', actor: 'guest', at: '2026-12-03T09:00:00.000Z', input: regimenInput({ animal: { weightG: 23 } }), plan }
+  const change = { id: 'pebble', actor: GUEST, at: '2026-12-03T09:00:00.000Z', input: regimenInput({ animal: { weightG: 23 } }), plan }
   beforeEach(() => insertRegimen(scratch.db, row))
 
   it('adds a version and leaves the old one as it was', () => {
