@@ -86,7 +86,7 @@ export default defineNuxtConfig({
     // Ours answers for /api and leaves the rest to Nuxt's, which shows error.vue. Set in the configuration it would replace Nuxt's.
     'nitro:config'(config) {
       // The cookie is read through requireMember and ended through sign-out; the module's own addresses would go around both.
-      config.handlers = config.handlers?.filter(one => one.route !== '/api/_auth/session')
+      config.handlers = config.handlers?.filter(one => one?.route !== '/api/_auth/session')
       config.errorHandler = [resolve(config.rootDir ?? '.', 'server/error.ts'), ...[config.errorHandler ?? []].flat()]
     },
     // Migrations and print fonts are read from disk: beside the built server, and in the sources while developing.

@@ -175,6 +175,14 @@ export const usePlannerStore = defineStore('planner', () => {
     clear()
   }
 
+  /** Empties everything, for the next person at a shared computer. */
+  function forget() {
+    clear()
+    draft.value = emptyDraft()
+    undone.value = null
+    justSaved.value = null
+  }
+
   function undo() {
     if (!undone.value) return
     draft.value = undone.value.draft
@@ -193,5 +201,5 @@ export const usePlannerStore = defineStore('planner', () => {
     note.value = ''
   }
 
-  return { draft, editing, plan, problem, working, saving, undone, justSaved, begunOn, filledFrom, note, needed, issues, behind, fillFromTeam, fillFromBrowser, startNow, issueAt, preview, save, saveOnTop, printPreview, startOver, undo, change }
+  return { draft, editing, plan, problem, working, saving, undone, justSaved, begunOn, filledFrom, note, needed, issues, behind, fillFromTeam, fillFromBrowser, startNow, issueAt, preview, save, saveOnTop, printPreview, startOver, forget, undo, change }
 })

@@ -36,13 +36,13 @@ export interface StartedServer {
  * Starts the built server as a person would: node, the entry, an environment. Answers once it does.
  * Its data folder is thrown away at its end unless one was given.
  */
-export async function startServer(options: { dataDir?: string, env?: Record<string, string> } = {}): Promise<StartedServer> {
+export async function startServer(options: { dataDir?: string, env?: Record<string, string>, /** Mail leaves through this address: links in it then lead back here. */ smtpUrl?: string } = {}): Promise<StartedServer> {
   if (!existsSync(ENTRY)) throw new Error('There is no built application. Run npm run build first.')
   const folder = options.dataDir ?? mkdtempSync(join(tmpdir(), 'thimbleful-e2e-'))
   const port = await freePort()
   const url = `http://127.0.0.1:${port}`
   const { NUXT_SESSION_PASSWORD: _, ...inherited } = process.env
-  const child = spawn(process.execPath, [ENTRY], { cwd: folder, env: { ...inherited, NODE_ENV: 'production', PORT: String(port), HOST: '127.0.0.1', NUXT_DATA_DIR: folder, NUXT_SEED_DEMO: 'false', NUXT_RATE_LIMIT_FACTOR: '1000', ...options.env } })
+  const child = spawn(process.execPath, [ENTRY], { cwd: folder, env: { ...inherited, NODE_ENV: 'production', PORT: String(port), HOST: '127.0.0.1', NUXT_DATA_DIR: folder, NUXT_SEED_DEMO: 'false', NUXT_RATE_LIMIT_FACTOR: '1000', ...(options.smtpUrl && { NUXT_SMTP_URL: options.smtpUrl, NUXT_SMTP_FROM: 'Saltings Rescue <plans@saltings.example>', NUXT_SMTP_RETRY_SECONDS: '1', NUXT_ORIGIN: url }), ...options.env } })
   let said = ''
   child.stdout.on('data', (text: Buffer) => said += text.toString())
   child.stderr.on('data', (text: Buffer) => said += text.toString())

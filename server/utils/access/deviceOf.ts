@@ -1,4 +1,4 @@
-const BROWSERS: [RegExp, string][] = [[/\bEdgA?\//, 'Edge'], [/\bOPR\//, 'Opera'], [/\bSamsungBrowser\//, 'Samsung Internet'], [/\bFirefox\/|\bFxiOS\//, 'Firefox'], [/\bChrome\/|\bCriOS\//, 'Chrome'], [/\bSafari\//, 'Safari']]
+const BROWSERS: [RegExp, string][] = [[/\bEdgA?\//, 'Edge'], [/\bOPR\//, 'Opera'], [/\bSamsungBrowser\//, 'Samsung Internet'], [/\bFirefox\/|\bFxiOS\//, 'Firefox'], [/Chrome\/|\bCriOS\//, 'Chrome'], [/\bSafari\//, 'Safari']]
 const SYSTEMS: [RegExp, string][] = [[/\bAndroid\b/, 'Android'], [/\biPhone\b/, 'iPhone'], [/\biPad\b/, 'iPad'], [/\bWindows\b/, 'Windows'], [/\bMac OS X\b/, 'Mac'], [/\bCrOS\b/, 'Chromebook'], [/\bLinux\b/, 'Linux']]
 
 /**

@@ -10,17 +10,21 @@ import { whoIs } from '../access/signedIn'
 import { database, findInvitation, findInvitationOf, findMember, findOpenInvitation, findTeam, findUser, findUserByEmail, insertInvitation, insertMember, insertUser, nameOfUser, setSessionTeam, updateInvitation, writeAudit, WRITING, type Writer } from '../data'
 import { fail } from '../http/fail'
 import { invitationMail } from '../mail/templates'
+import { hasMailService } from '../mail/worker'
 import { whenInZone } from '../regimen/whenInZone'
 import { enter, refuseCommon } from './accounts'
 import { meOf } from './meOf'
 import { serverOrigin } from './serverOrigin'
 import { queueMail } from './tell'
 
+/** `kept` where no mail service is set: the mail is only in the outbox. */
+interface InvitationReceipt { id: string, expiresAt: string, mail: 'waiting' | 'kept' }
+
 const DAY_MS = 86_400_000
 const AGAIN_DAYS = 7
 
 /** @throws 422 for somebody who is in the team, or invited, already. */
-export function invite(event: H3Event, member: Member, { email, role, days }: z.output<typeof InvitationInput>): { id: string, expiresAt: string } {
+export function invite(event: H3Event, member: Member, { email, role, days }: z.output<typeof InvitationInput>): InvitationReceipt {
   const { teamId, actor, user } = member
   const [id, token, now] = [newRegimenId(), newToken(), new Date()]
   const at = now.toISOString()
@@ -33,10 +37,10 @@ export function invite(event: H3Event, member: Member, { email, role, days }: z.
     sendInvitation(tx, event, member, { email, role, expiresAt }, token, at)
     writeAudit(tx, { at, actor, teamId, action: 'invitation.create', objectType: 'invitation', objectId: id, objectName: email, after: { email, role, expiresAt } })
   }, WRITING)
-  return { id, expiresAt }
+  return { id, expiresAt, mail: hasMailService() ? 'waiting' : 'kept' }
 }
 
-export function inviteAgain(event: H3Event, member: Member, id: string): { id: string, expiresAt: string } {
+export function inviteAgain(event: H3Event, member: Member, id: string): InvitationReceipt {
   const { teamId, actor } = member
   const [token, now] = [newToken(), new Date()]
   const at = now.toISOString()
@@ -47,7 +51,7 @@ export function inviteAgain(event: H3Event, member: Member, id: string): { id: s
     sendInvitation(tx, event, member, { ...invitation, expiresAt }, token, at)
     writeAudit(tx, { at, actor, teamId, action: 'invitation.resend', objectType: 'invitation', objectId: id, objectName: invitation.email, before: { expiresAt: invitation.expiresAt }, after: { expiresAt } })
   }, WRITING)
-  return { id, expiresAt }
+  return { id, expiresAt, mail: hasMailService() ? 'waiting' : 'kept' }
 }
 
 function sendInvitation(tx: Writer, event: H3Event, { team, teamId, user, settings }: Member, { email, role, expiresAt }: Pick<InvitationRecord, 'email' | 'role' | 'expiresAt'>, token: string, at: string): void {

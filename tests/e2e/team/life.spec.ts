@@ -20,8 +20,7 @@ const infoOf = async (id: string, who: keyof Team['people'] = 'keeper') => (awai
 async function paper(by: Browser, path: string): Promise<string> {
   const answer = await fetch(baseUrl() + path, { headers: { cookie: by.cookie } })
   expect(answer.status).toBe(200)
-  const pages = await readPdf(Buffer.from(await answer.arrayBuffer()))
-  return pages.map(page => page.text).join(' ').replace(/\s+/g, ' ')
+  return (await readPdf(Buffer.from(await answer.arrayBuffer()))).text.replace(/\s+/g, ' ')
 }
 /** The address in the square code of a team's sheet, by the secret of the server under test. */
 async function sheetLook(id: string, version: number): Promise<SheetLook> {

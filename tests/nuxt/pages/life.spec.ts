@@ -21,7 +21,7 @@ const edition = currentEdition()
 const plan = buildPlan(regimenInput(), edition)
 const none: Standing = { state: 'none', band: 'NOT APPROVED BY A VET', line: 'No vet has approved this version.' }
 const approval = { version: 1, weightG: 22, fromDate: '2026-12-02', goodUntil: '2026-12-09', edition: plan.edition, vetName: 'Dr Amara Osei', registration: 'DEMO-0142', note: '', at: '2026-12-02T18:40:00Z', lapsedAt: null, lapseReason: null }
-const row: PlanRow = { id: 'abc', version: 3, animalName: 'Pebble', caseNumber: '', speciesName: 'Leopard gecko', enclosure: 'Warm room, tank 4', room: 'Warm room', weightG: 22, goodUntil: '2026-12-09', state: 'checked', waiting: 'approval', waitingSince: '2026-12-01T14:10:00Z', standing: none, updatedAt: '2026-12-01T14:10:00Z', updatedBy: 'Mara Linde' }
+const row: PlanRow = { id: 'abc', version: 3, animalName: 'Pebble', caseNumber: '', speciesName: 'Leopard gecko', enclosure: 'Warm room, tank 4', room: 'Warm room', weightG: 22, goodUntil: '2026-12-09', state: 'checked', waiting: 'approval', askedBy: 'Mara Linde', waitingSince: '2026-12-01T14:10:00Z', standing: none, updatedAt: '2026-12-01T14:10:00Z', updatedBy: 'Mara Linde' }
 const page = <Item>(items: Item[]) => ({ items, total: items.length, page: 1, pageSize: 25 })
 
 let info: Partial<TeamPlanInfo> = {}

@@ -320,8 +320,8 @@ describe('plans that were worked out', () => {
     route: fc.constantFrom('syringe' as const, 'tube' as const),
     startAt: fc.constantFrom('2026-12-02T09:00:00Z', '2026-12-05T16:00:00Z'),
     feedsPerDay: fc.constantFrom(undefined, 1, 6),
-    syringes: fc.constantFrom(undefined, [{ capacityMl: 3, stepMl: 0.1 }], [{ capacityMl: 1, stepMl: 0.05 }, { capacityMl: 3, stepMl: 0.1 }]),
-    contacts: fc.constantFrom(undefined, [{ role: 'Vet' }], [{ role: 'Vet', name: 'Dr Osei' }, { role: 'At night', phone: '00 5550 0199' }]),
+    syringes: fc.constantFrom<RegimenInput['syringes'][]>(undefined, [{ capacityMl: 3, stepMl: 0.1 }], [{ capacityMl: 1, stepMl: 0.05 }, { capacityMl: 3, stepMl: 0.1 }]),
+    contacts: fc.constantFrom<RegimenInput['contacts'][]>(undefined, [{ role: 'Vet' }], [{ role: 'Vet', name: 'Dr Osei' }, { role: 'At night', phone: '00 5550 0199' }]),
   })
 
   /** Days as nobody plans them: feeds of one day that differ, gaps, days that wait. */
