@@ -18,7 +18,10 @@ export const useSessionStore = defineStore('session', () => {
     try {
       take(await useRequestFetch()<Me | { user: null }>('/api/auth/me'))
     }
-    catch { known.value = true }
+    catch {
+      // Without an answer nobody counts as signed in; the routes decide in any case.
+      known.value = true
+    }
   }
   async function signIn(input: z.input<typeof SignInInput>) {
     return take(await $fetch<Me>('/api/auth/sign-in', { method: 'POST', body: input }))

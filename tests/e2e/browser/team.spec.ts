@@ -55,13 +55,13 @@ async function expectUsable(page: Page) {
     await page.setViewportSize({ width, height: 900 })
     expect(await page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth), `${page.url()} at ${width} px`).toBe(0)
     if (width !== 1440 && width !== 390) continue
-    for (const lamp of [false, true]) {
-      await page.evaluate(on => document.documentElement.classList.toggle('lamp', on), lamp)
-      const { violations } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze()
-      expect(violations.map(one => `${page.url()} ${width} ${lamp ? 'lamp' : 'day'} ${one.id}: ${one.nodes.slice(0, 3).map(node => node.target.join(' ')).join(' | ')}`)).toEqual([])
-    }
-    await page.evaluate(() => document.documentElement.classList.remove('lamp'))
+    // A desk by day, a phone under the lamp.
+    const lamp = width === 390
+    await page.evaluate(on => document.documentElement.classList.toggle('lamp', on), lamp)
+    const { violations } = await new AxeBuilder({ page }).withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa', 'best-practice']).analyze()
+    expect(violations.map(one => `${page.url()} ${width} ${one.id}: ${one.nodes.slice(0, 3).map(node => node.target.join(' ')).join(' | ')}`)).toEqual([])
   }
+  await page.evaluate(() => document.documentElement.classList.remove('lamp'))
   await page.setViewportSize(size)
 }
 
@@ -130,7 +130,9 @@ describe('a team around one animal', () => {
     await mara.getByRole('combobox', { name: /Species/ }).click()
     await mara.keyboard.type('inland bearded')
     await mara.keyboard.press('Enter')
+    await mara.getByText('Name, case number, enclosure, earlier weight').click()
     await mara.getByLabel(/^Name/).first().fill('Juniper')
+    await mara.getByLabel(/^Enclosure/).fill('Warm room, tank 4')
     await mara.getByLabel(/^Weight now/).fill('182')
     await mara.getByLabel(/^Temperature now/).fill('36')
     await mara.getByLabel(/^Dryness/).fill('8')
