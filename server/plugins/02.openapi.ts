@@ -10,7 +10,7 @@ interface OpenApiDocument { components?: { schemas?: Record<string, unknown> }, 
 
 /**
  * Puts the shape of what may be sent into the generated OpenAPI document, from the schemas that check it: described by
- * hand it would drift from them. A route names its schema in the description of its body.
+ * hand it would drift from them. A route names its schema first in the description of its body.
  */
 export default defineNitroPlugin((nitroApp) => {
   const known = Object.fromEntries(Object.entries({ ...auth, ...planLife, ...regimen, ...team }).flatMap(([name, schema]) => schema instanceof z.ZodType ? [[name, jsonSchemaOf(schema)]] : []))
@@ -19,7 +19,7 @@ export default defineNitroPlugin((nitroApp) => {
     const document = response.body as OpenApiDocument
     const schemas: Record<string, unknown> = {}
     for (const { requestBody } of Object.values(document.paths ?? {}).flatMap(operations => Object.values(operations))) {
-      const name = requestBody?.description ?? ''
+      const name = /^\w+/.exec(requestBody?.description ?? '')?.[0] ?? ''
       if (!requestBody || !(name in known)) continue
       schemas[name] = known[name]
       requestBody.content = { 'application/json': { schema: { $ref: `#/components/schemas/${name}` } } }

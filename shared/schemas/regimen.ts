@@ -92,6 +92,9 @@ export const SheetQuery = z.object({
 })
 export type SheetQuery = z.infer<typeof SheetQuery>
 
+/** A packet goes with the animal: it holds a week where nothing else is asked for. */
+export const PacketQuery = SheetQuery.extend({ days: SheetQuery.shape.days.unwrap().default('1-7') })
+
 /** A change of a saved plan: the whole input again, and the version it is based on. */
 export const RegimenChange = RegimenInput.extend({
   baseVersion: z.number({ error: 'The version this change is based on must be a whole number.' }).int('The version this change is based on must be a whole number.').min(1, 'Versions begin at 1.').optional(),

@@ -1,4 +1,4 @@
-import { RegimenParams, SheetQuery } from '#shared/schemas/regimen'
+import { PacketQuery, RegimenParams } from '#shared/schemas/regimen'
 import { requireRegimen } from '#server/utils/access/requireRegimen'
 import { limitRequests } from '#server/utils/http/limitRequests'
 import { readParamsOf, readQueryOf } from '#server/utils/http/readInput'
@@ -9,7 +9,7 @@ defineRouteMeta({ openAPI: { tags: ['Paper'], summary: 'The foster packet: cover
 export default defineEventHandler(async (event) => {
   await limitRequests(event, 'print', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
-  const query = readQueryOf(event, SheetQuery)
+  const query = readQueryOf(event, PacketQuery)
   const { row } = await requireRegimen(event, id, query.key, 'plan.print')
   return sendSavedPdf(event, 'packet', row, query)
 })
