@@ -49,7 +49,7 @@ export function insertRegimen(db: Writer, row: NewRegimen): void {
  * @throws RegimenChangedError when `baseVersion` is given and is not the newest.
  * @returns the new version's number.
  */
-export function insertRegimenVersion(db: Db, row: { id: string, baseVersion?: number, actor: Actor, at: string, input: RegimenInput, plan: Plan, note?: string }): number {
+export function insertRegimenVersion(db: Db, row: { id: string, baseVersion?: number, actor: Actor, at: string, input: RegimenInput, plan: Plan, note?: string }, also?: (tx: Writer, lapsed: ApprovalRecord[]) => void): number {
   const { id, actor, at, input, plan, note = '' } = row
   return db.transaction((tx) => {
     const current = tx.select().from(regimens).where(eq(regimens.id, id)).get()!
@@ -63,7 +63,7 @@ export function insertRegimenVersion(db: Db, row: { id: string, baseVersion?: nu
     }).where(eq(regimens.id, id)).run()
     const objectName = input.animal.name || plan.animal.speciesName
     writeAudit(tx, { at, actor, teamId: current.teamId, action: 'regimen.change', objectType: 'regimen', objectId: id, objectName, version, reason: note, ...changedFields(JSON.parse(before.inputJson), input), detail: { replaces: current.latestVersion, wasState: current.state } })
-    lapseApprovals(tx, { regimenId: id, teamId: current.teamId, objectName, at, actor, reason: `Version ${version} replaced it.` })
+    also?.(tx, lapseApprovals(tx, { regimenId: id, teamId: current.teamId, objectName, at, actor, reason: `Version ${version} replaced it.` }))
     return version
   }, WRITING)
 }

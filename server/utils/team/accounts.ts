@@ -8,8 +8,8 @@ import { isCommonPassword } from '../access/commonPassword'
 import { deviceOf } from '../access/deviceOf'
 import { hashOfKey, newRegimenId, newToken } from '../access/linkKey'
 import { actorOf } from '../access/requireMember'
-import { enterSession, newSession, whoIs, type Who } from '../access/signedIn'
-import { database, endSessions, findUser, findUserByEmail, hasSessions, insertMember, insertSession, insertTeam, insertUser, insertUserToken, knowsDevice, newestTeamOf, takeUserToken, teamsOf, updateUser, writeAudit, WRITING, type Writer } from '../data'
+import { enterSession, forgetSession, newSession, whoIs, type Who } from '../access/signedIn'
+import { database, endSession, endSessions, findUser, findUserByEmail, hasSessions, insertMember, insertSession, insertTeam, insertUser, insertUserToken, knowsDevice, newestTeamOf, takeUserToken, teamsOf, updateUser, writeAudit, WRITING, type Writer } from '../data'
 import { fail } from '../http/fail'
 import { emailChangeAskMail, emailChangeToldMail, newSignInMail, passwordResetMail } from '../mail/templates'
 import { hasMailService } from '../mail/worker'
@@ -64,7 +64,7 @@ async function meNow(event: H3Event, _sessionId: string, userId: string): Promis
 export function newSignInTold(event: H3Event, user: UserRecord): ((tx: Writer, at: string) => void) | null {
   const device = deviceOf(getRequestHeader(event, 'user-agent'))
   if (!hasSessions(database(), user.id) || knowsDevice(database(), user.id, device)) return null
-  return (tx, at) => queueMail(tx, demoTeamOf(user), user.email, newSignInMail({ name: user.name, when: whenInZone(at, zoneOf(user)), device, address: getRequestIP(event) ?? 'unknown', link: `${serverOrigin(event)}/profile` }), at)
+  return (tx, at) => queueMail(tx, mailTeamOf(user), user.email, newSignInMail({ name: user.name, when: whenInZone(at, zoneOf(user)), device, address: getRequestIP(event) ?? 'unknown', link: `${serverOrigin(event)}/profile` }), at)
 }
 
 /** A new account with a team of its own. */
@@ -98,7 +98,7 @@ export function sendReset(event: H3Event, email: string): string {
     const at = now.toISOString()
     database().transaction((tx) => {
       insertUserToken(tx, { tokenHash: hashOfKey(token), userId: user.id, kind: 'reset', createdAt: at, expiresAt: new Date(now.getTime() + HOUR_MS).toISOString() })
-      queueMail(tx, demoTeamOf(user), user.email, passwordResetMail({ name: user.name, link: `${origin}/reset#${token}` }), at)
+      queueMail(tx, mailTeamOf(user), user.email, passwordResetMail({ name: user.name, link: `${origin}/reset#${token}` }), at)
     }, WRITING)
   })
   return hasMailService()
@@ -125,6 +125,23 @@ export async function resetPassword(token: string, password: string): Promise<Us
 export async function checkPassword(user: UserRecord, password: string, right: () => void): Promise<void> {
   if (!await verifyPassword(user.passwordHash, password)) throw fail({ status: 422, code: 'auth.passwordWrong', message: 'This is not your password.', issues: [{ path: 'password', message: 'This is not your password.' }] })
   right()
+}
+
+/** Ends one sign-in of a person, or all but the present one. @returns how many ended. */
+export function endSignIns({ user, session, team }: Who, id?: string): number {
+  const at = new Date().toISOString()
+  return database().transaction((tx) => {
+    const ended = id === undefined ? endSessions(tx, user.id, at, session.id) : Number(endSession(tx, user.id, id, at))
+    if (ended > 0) writeAudit(tx, { at, actor: actorOf(user), teamId: team?.id ?? null, action: 'session.end', objectType: 'user', objectId: user.id, objectName: user.name, detail: { ended } })
+    return ended
+  }, WRITING)
+}
+
+/** Signs this browser out; one that is not signed in stays so. */
+export async function signOut(event: H3Event): Promise<void> {
+  const who = await whoIs(event)
+  if (who) endSignIns(who, who.session.id)
+  await forgetSession(event)
 }
 
 export async function changePassword(who: Who, newPassword: string): Promise<Me> {
@@ -156,11 +173,11 @@ export function askEmailChange(event: H3Event, { user }: Who, newEmail: string):
   const at = now.toISOString()
   const origin = serverOrigin(event)
   database().transaction((tx) => {
-    queueMail(tx, demoTeamOf(user), user.email, emailChangeToldMail({ name: user.name, newEmail, changed: false, link: `${origin}/profile` }), at)
+    queueMail(tx, mailTeamOf(user), user.email, emailChangeToldMail({ name: user.name, newEmail, changed: false, link: `${origin}/profile` }), at)
     // An address that has an account already gets no link, and the one who asks is not told of it.
     if (findUserByEmail(tx, newEmail)) return
     insertUserToken(tx, { tokenHash: hashOfKey(token), userId: user.id, kind: 'email', newEmail, createdAt: at, expiresAt: new Date(now.getTime() + 24 * HOUR_MS).toISOString() })
-    queueMail(tx, demoTeamOf(user), newEmail, emailChangeAskMail({ name: user.name, link: `${origin}/confirm-email#${token}` }), at)
+    queueMail(tx, mailTeamOf(user), newEmail, emailChangeAskMail({ name: user.name, link: `${origin}/confirm-email#${token}` }), at)
   }, WRITING)
   return `Open the link in the mail to ${newEmail} within a day. Until then you sign in with the address you have.`
 }
@@ -173,7 +190,7 @@ export function confirmEmail(event: H3Event, token: string): string {
     if (!taken?.newEmail || findUserByEmail(tx, taken.newEmail)) throw linkEnded()
     const user = findUser(tx, taken.userId)!
     updateUser(tx, user.id, { email: taken.newEmail })
-    queueMail(tx, demoTeamOf(user), user.email, emailChangeToldMail({ name: user.name, newEmail: taken.newEmail, changed: true, link: `${serverOrigin(event)}/profile` }), at)
+    queueMail(tx, mailTeamOf(user), user.email, emailChangeToldMail({ name: user.name, newEmail: taken.newEmail, changed: true, link: `${serverOrigin(event)}/profile` }), at)
     writeAudit(tx, { at, actor: actorOf(user), teamId: newestTeamOf(tx, user.id), action: 'user.changeEmail', objectType: 'user', objectId: user.id, objectName: user.name, before: { email: user.email }, after: { email: taken.newEmail } })
     return taken.newEmail
   }, WRITING)
@@ -188,9 +205,12 @@ export function refuseCommon(password: string, own: string[], path = 'password')
   if (isCommonPassword(password, own)) throw fail({ status: 422, code: 'auth.commonPassword', message: 'This password is among those that are tried first. Take another, for example four words that do not belong together.', issues: [{ path, message: 'This password is among those that are tried first. Take another.' }] })
 }
 
-/** Mails about an account are nobody else's business; those of invented people are shown in the demonstration's outbox. */
-export function demoTeamOf(user: UserRecord): string | null {
-  return user.demo ? teamsOf(database(), user.id).find(team => team.demo)?.id ?? null : null
+/**
+ * The team whose coordinators see that a mail about an account waits or failed, never what it says. Only the outbox of
+ * the demonstration shows texts, so nobody but its invented people may have mails there.
+ */
+export function mailTeamOf(user: UserRecord): string | null {
+  return teamsOf(database(), user.id).find(team => team.demo === user.demo)?.id ?? null
 }
 
 function zoneOf(user: UserRecord): string {

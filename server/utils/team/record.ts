@@ -12,7 +12,7 @@ const ACTIONS: Record<string, string> = {
   'link.create': 'made a link for helpers', 'link.revoke': 'took a link back', 'link.open': 'opened a link for helpers',
   'invitation.create': 'invited somebody', 'invitation.resend': 'sent an invitation again', 'invitation.withdraw': 'withdrew an invitation',
   'member.join': 'joined the team', 'member.changeRole': 'changed a role', 'member.remove': 'took somebody out of the team', 'member.leave': 'left the team',
-  'team.create': 'made the team', 'team.change': 'changed the settings', 'session.begin': 'signed in',
+  'team.create': 'made the team', 'team.change': 'changed the settings', 'session.begin': 'signed in', 'session.end': 'signed a browser out',
   'user.change': 'changed the profile', 'user.changePassword': 'changed the password', 'user.resetPassword': 'set a new password', 'user.changeEmail': 'changed the e-mail address', 'user.codesOn': 'turned one-time codes on', 'user.codesOff': 'turned one-time codes off',
   'transfer.offer': 'made a link to hand the animal over', 'transfer.withdraw': 'took that link back', 'transfer.decline': 'declined to take the animal', 'transfer.accept': 'took the animal over', 'transfer.receive': 'received the animal',
   'record.begin': 'began the record',

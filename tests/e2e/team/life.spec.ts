@@ -118,6 +118,7 @@ describe('an approval', () => {
   it('ends with any change, on screen and on paper', async () => {
     const id = await approvedPlan(team)
     await team.people.keeper.done('PATCH', `/api/regimens/${id}`, { ...juniperNow({ enclosure: 'Warm room, tank 5' }), baseVersion: 1, note: 'moved' })
+    expect(withDatabase(db => db.prepare('select text from mails where to_address = ? and kind = \'approvalLapsed\' order by id desc limit 1').pluck().get(team.emails.vet))).toContain(`/plans/${id}`)
     expect(await infoOf(id)).toMatchObject({ state: 'draft', standing: { state: 'none' } })
     expect(await paper(team.people.carer, `/api/regimens/${id}/sheet.pdf`)).toContain('NOT APPROVED BY A VET')
     expect(await paper(team.people.carer, `/api/regimens/${id}/sheet.pdf?version=1`)).toMatch(/APPROVAL LAPSED.*SUPERSEDED|SUPERSEDED.*APPROVAL LAPSED/)

@@ -10,5 +10,5 @@ export default defineEventHandler(async (event) => {
   await limitRequests(event, 'save', useRuntimeConfig().rateLimitFactor)
   const { id } = readParamsOf(event, RegimenParams)
   const opened = await requireRegimen(event, id, readQueryOf(event, RegimenQuery).key, 'plan.edit')
-  return { id, version: saveChange(opened, await readBodyOf(event, RegimenChange)) }
+  return { id, version: saveChange(event, opened, await readBodyOf(event, RegimenChange)) }
 })
