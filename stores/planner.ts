@@ -27,6 +27,8 @@ export const usePlannerStore = defineStore('planner', () => {
   const filledFrom = ref('')
   /** What changed, for the version that is about to be saved. */
   const note = ref('')
+  /** Weight and day of the saved plan that is being changed. */
+  let weighedBefore: { weight: string, on: string } | null = null
   let sequence = 0
   let aborter: AbortController | null = null
 
@@ -72,8 +74,17 @@ export const usePlannerStore = defineStore('planner', () => {
     return ++sequence
   }
 
+  /** Another weight of a saved plan was weighed today, unless its day is given too: an old day under a new weight would be untrue. */
+  function dateNewWeight() {
+    const { weight, weighedOn } = draft.value
+    if (!weighedBefore || weight.text === weighedBefore.weight || weight.text.trim() === '') return
+    if (weighedOn === weighedBefore.on) draft.value.weighedOn = localOf(new Date()).slice(0, 10)
+    weighedBefore = null
+  }
+
   /** Works the plan out again. An answer that a newer question has overtaken is dropped. */
   async function preview() {
+    dateNewWeight()
     const { input, issues: found } = inputOfDraft(draft.value)
     localIssues.value = found
     const mine = overtake()
@@ -147,6 +158,7 @@ export const usePlannerStore = defineStore('planner', () => {
 
   function clear() {
     overtake()
+    weighedBefore = null
     draft.value = nextDraft(draft.value)
     editing.value = null
     plan.value = null
@@ -193,6 +205,7 @@ export const usePlannerStore = defineStore('planner', () => {
   function change(saved: SavedRegimen & { team?: unknown }, key: string | null) {
     overtake()
     draft.value = draftOfInput(saved.input)
+    weighedBefore = { weight: draft.value.weight.text, on: draft.value.weighedOn }
     editing.value = { id: saved.id, version: saved.latestVersion, key, ...(saved.team ? { team: true } : {}) }
     plan.value = saved.plan
     undone.value = null

@@ -44,7 +44,9 @@ function addTeam(db: Db, settings: TeamSettings, passwordHash: string, now: Date
 
 function seedPlan(db: Db, { input, by, hoursAgo, steps }: DemoPlan, settings: TeamSettings, now: Date): void {
   const ago = (hours: number) => new Date(now.getTime() - hours * HOUR_MS)
-  const whole = (weightG: number, at: Date): RegimenInput => ({ ...input, animal: { ...input.animal, weightG }, startAt: at.toISOString(), syringes: settings.syringes })
+  const start = ago(hoursAgo).toISOString()
+  // A plan goes on from where it began; what is new is the weight and its day.
+  const whole = (weightG: number, at: Date): RegimenInput => ({ ...input, animal: { ...input.animal, weightG, weighedOn: at.toISOString().slice(0, 10) }, startAt: start, syringes: settings.syringes })
   const id = newRegimenId()
   const first = whole(input.animal.weightG, ago(hoursAgo))
   insertRegimen(db, { id, ...newLinkKey(now), teamId: ID, actor: actorOfDemo(by), at: first.startAt, input: first, plan: buildPlan(first, currentEdition()) })

@@ -26,8 +26,11 @@ export function planValidity(context: PlanContext, tier: Tier, days: readonly Pl
   const every = !context.ectotherm ? rules.validity.weighEveryDays.endotherm : highRisk ? rules.validity.weighEveryDays.ectothermHighRisk : rules.validity.weighEveryDays.ectotherm
   const goodUntil = addDays(weighedOn, life.value)
   const startDate = days[0]!.date
-  if (weighedOn > startDate) {
-    context.findings.push(makeFinding('weight.fromTheFuture', 'caution', 'Weighed after the plan begins', `The weight is dated ${formatDay(weighedOn)}, the plan begins on ${formatDay(startDate)}. Check the dates.`, { path: 'animal.weighedOn', expected: startDate, received: weighedOn }))
+  if (weighedOn > days.at(-1)!.date) {
+    context.findings.push(makeFinding('weight.fromTheFuture', 'caution', 'Weighed after the plan ends', `The weight is dated ${formatDay(weighedOn)}, the plan begins on ${formatDay(startDate)}. Check the dates.`, { path: 'animal.weighedOn', expected: startDate, received: weighedOn }))
+  }
+  else if (weighedOn > startDate) {
+    context.findings.push(makeFinding('weight.sinceStart', 'note', 'Weighed since the plan began', `It began on ${formatDay(startDate)}. All amounts are worked out from the weight of ${formatDay(weighedOn)}.`, { path: 'animal.weighedOn', received: weighedOn }))
   }
   else if (goodUntil < startDate) {
     gate.findings.push(makeFinding('weight.stale', 'stop', 'The weight is too old', `It was weighed on ${formatDay(weighedOn)}; a weight carries a plan like this for ${life.value} days. Weigh it again before the first feed.`, { path: 'animal.weighedOn', expected: `${life.value} days at most`, received: weighedOn, sourceKey: 'house-rule' }))

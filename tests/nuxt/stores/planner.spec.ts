@@ -6,6 +6,8 @@ import { TeamSettings } from '#shared/schemas/team'
 import type { Plan, SavedRegimen } from '#shared/types/plan'
 import { usePlannerStore } from '~/stores/planner'
 import { emptyDraft, type PlannerDraft } from '~/utils/plannerDraft'
+import { buildPlan } from '#server/utils/plan/buildPlan'
+import { currentEdition } from '#server/utils/reference'
 import { regimenInput } from '../../unit/plan/inputs'
 
 /** What the server was asked, and what it answers next. Its plans are told apart by their weight alone. */
@@ -251,4 +253,25 @@ describe('starting over', () => {
     planner.undo()
     expect(planner.draft.name).toBe('Pebble')
   })
+})
+
+it('dates a new weight of a saved plan today, once, and leaves a day that was given', async () => {
+  const planner = usePlannerStore()
+  const input = regimenInput({ animal: { weighedOn: '2026-12-02' } })
+  const saved = { id: 'abc', version: 1, latestVersion: 1, createdAt: '', linkExpiresAt: '', edition: '', input, plan: buildPlan(input, currentEdition()) }
+  const today = new Date().toLocaleDateString('sv-SE')
+  planner.change(saved, null)
+  await planner.preview()
+  expect(planner.draft.weighedOn).toBe('2026-12-02')
+  planner.draft.weight.text = '24'
+  await planner.preview()
+  expect(planner.draft.weighedOn).toBe(today)
+  planner.draft.weighedOn = '2026-12-02'
+  await planner.preview()
+  expect(planner.draft.weighedOn).toBe('2026-12-02')
+  planner.change(saved, null)
+  planner.draft.weight.text = '24'
+  planner.draft.weighedOn = '2026-12-03'
+  await planner.preview()
+  expect(planner.draft.weighedOn).toBe('2026-12-03')
 })

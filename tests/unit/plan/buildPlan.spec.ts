@@ -194,3 +194,10 @@ describe('clock changes', () => {
     expect(after.feeds[0]!.at).toBe('2026-03-30T06:30:00.000Z')
   })
 })
+
+describe('a weight from after the start', () => {
+  const codes = (weighedOn: string) => buildPlan(regimenInput({ animal: { weighedOn } }), currentEdition()).findings.filter(one => one.code.startsWith('weight.')).map(one => `${one.code} ${one.level}`)
+  it('is how a plan goes on, and says so', () => expect(codes('2026-12-04')).toEqual(['weight.sinceStart note']))
+  it('is doubted when it lies behind the plan', () => expect(codes('2027-11-04')).toEqual(['weight.fromTheFuture caution']))
+  it('carries the plan from its own day', () => expect(buildPlan(regimenInput({ animal: { weighedOn: '2026-12-04' } }), currentEdition()).validity.goodUntil).toBe('2026-12-11'))
+})
