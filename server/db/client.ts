@@ -30,3 +30,9 @@ export function database(): Db {
   if (!open) open = openDatabase(join(dataFolder(), 'thimbleful.db'))
   return open
 }
+
+/** Lets go of the file; the next question opens the one that is then set. */
+export function closeDatabase(): void {
+  open?.$client.close()
+  open = null
+}

@@ -63,7 +63,8 @@ export function insertRegimenVersion(db: Db, row: { id: string, baseVersion?: nu
     }).where(eq(regimens.id, id)).run()
     const objectName = input.animal.name || plan.animal.speciesName
     writeAudit(tx, { at, actor, teamId: current.teamId, action: 'regimen.change', objectType: 'regimen', objectId: id, objectName, version, reason: note, ...changedFields(JSON.parse(before.inputJson), input), detail: { replaces: current.latestVersion, wasState: current.state } })
-    also?.(tx, lapseApprovals(tx, { regimenId: id, teamId: current.teamId, objectName, at, actor, reason: `Version ${version} replaced it.` }))
+    const lapsed = lapseApprovals(tx, { regimenId: id, teamId: current.teamId, objectName, at, actor, reason: `Version ${version} replaced it.` })
+    also?.(tx, lapsed)
     return version
   }, WRITING)
 }

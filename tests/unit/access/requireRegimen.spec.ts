@@ -1,5 +1,6 @@
 import type { H3Event } from 'h3'
 import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
+import { closeDatabase } from '../../../server/db/client'
 import { migrateDatabase } from '../../../server/db/migrate'
 import { newLinkKey } from '../../../server/utils/access/linkKey'
 import { isOpen, opensRegimen, requireRegimen } from '../../../server/utils/access/requireRegimen'
@@ -19,6 +20,7 @@ let remembered: { id: string, key: string }[] = []
 
 beforeAll(() => {
   vi.stubEnv('NUXT_DATA_DIR', scratch.folder)
+  closeDatabase()
   // Nuxt's own functions, where the cookie is read.
   vi.stubGlobal('useRuntimeConfig', () => ({ session: { name: 'thimbleful' } }))
   vi.stubGlobal('getUserSession', () => Promise.resolve({ secure: { plans: remembered } }))
@@ -29,7 +31,7 @@ beforeAll(() => {
   insertRegimen(database(), { id: 'demo', ...demo, ...row, demo: true })
 })
 afterAll(() => {
-  database().$client.close()
+  closeDatabase()
   scratch.remove()
   vi.unstubAllGlobals()
   vi.unstubAllEnvs()
