@@ -1,5 +1,6 @@
-import { getRequestIP, setResponseHeader, type H3Event } from 'h3'
+import { setResponseHeader, type H3Event } from 'h3'
 import { database, findAttempts, forgetAttempts, forgetAttemptsBefore, saveAttempts } from '../data'
+import { addressOf } from '../http/addressOf'
 import { fail } from '../http/fail'
 import { hashOfKey } from './linkKey'
 
@@ -27,7 +28,7 @@ export function takeAttempt(event: H3Event, kind: Tried, account: string | null,
   const now = Date.now()
   const db = database()
   const keys = [
-    { key: `${kind}|address|${getRequestIP(event) ?? 'unknown'}`, free: Math.ceil(FREE.address * factor), isAccount: false },
+    { key: `${kind}|address|${addressOf(event)}`, free: Math.ceil(FREE.address * factor), isAccount: false },
     ...account === null ? [] : [{ key: `${kind}|account|${hashOfKey(account).slice(0, 32)}`, free: FREE.account, isAccount: true }],
   ]
   const counted = keys.map((one) => {
@@ -44,10 +45,11 @@ export function takeAttempt(event: H3Event, kind: Tried, account: string | null,
   const at = new Date(now).toISOString()
   for (const one of counted) saveAttempts(db, one.key, one.failures + 1, at)
   return () => {
-    for (const one of counted) {
-      // Whoever knows one account must not clear the way for trying others from the same address.
-      if (one.isAccount || one.failures === 0) forgetAttempts(db, one.key)
-      else saveAttempts(db, one.key, one.failures, at)
+    for (const { key, isAccount } of counted) {
+      const left = (findAttempts(db, key)?.failures ?? 0) - 1
+      // Whoever knows one account must not clear the way for trying others from the same address: there only this one try is taken back.
+      if (isAccount || left <= 0) forgetAttempts(db, key)
+      else saveAttempts(db, key, left, at)
     }
   }
 }

@@ -1,6 +1,7 @@
-import { getHeader, getRequestIP, type H3Event } from 'h3'
+import { getHeader, type H3Event } from 'h3'
 import type { MemberRecord, SessionRecord, TeamRecord, UserRecord } from '#shared/types/rows'
 import { database, endSession, findMember, findSession, findTeam, newestTeamOf, setSessionTeam, touchSession } from '../data'
+import { addressOf } from '../http/addressOf'
 import { deviceOf } from './deviceOf'
 import { hashOfKey, newRegimenId, newToken } from './linkKey'
 import { readCookie, writeCookie } from './sealedCookie'
@@ -47,7 +48,7 @@ export function newSession(event: H3Event, userId: string, teamId: string | null
   const now = new Date()
   const at = now.toISOString()
   const token = newToken()
-  const row = { id: newRegimenId(), userId, teamId, tokenHash: hashOfKey(token), device: deviceOf(getHeader(event, 'user-agent')), address: getRequestIP(event) ?? '', createdAt: at, lastSeenAt: at, expiresAt: expiryOf(at, now) }
+  const row = { id: newRegimenId(), userId, teamId, tokenHash: hashOfKey(token), device: deviceOf(getHeader(event, 'user-agent')), address: addressOf(event), createdAt: at, lastSeenAt: at, expiresAt: expiryOf(at, now) }
   return { row, token }
 }
 export type NewSession = Omit<SessionRecord, 'endedAt'>

@@ -99,3 +99,10 @@ export function listTransfers(db: Db, teamId: string, now: string, asked: ListAs
     (limit, offset) => db.select({ row: transfers, by: users.name, animal: regimens.animalName, species: regimens.speciesName, other: teams.name }).from(transfers).innerJoin(users, eq(users.id, transfers.createdById)).innerJoin(regimens, eq(regimens.id, transfers.regimenId)).leftJoin(teams, eq(teams.id, transfers.otherTeamId)).where(where).orderBy(desc(transfers.createdAt), desc(transfers.id)).limit(limit).offset(offset).all(),
     ({ row, by, animal, species, other }) => ({ id: row.id, regimenId: row.regimenId, animal: animal || species, state: row.state === 'open' && row.expiresAt <= now ? 'expired' : row.state, createdBy: by, createdAt: row.createdAt, expiresAt: row.expiresAt, decidedAt: row.decidedAt, decidedBy: row.decidedBy, otherTeam: other }))
 }
+
+/** Links somebody made who is leaving: they may still have the addresses. @returns how many ended. */
+export function endLinksOf(tx: Writer, teamId: string, userId: string, at: string): number {
+  const links = tx.update(helperLinks).set({ revokedAt: at }).where(and(eq(helperLinks.teamId, teamId), eq(helperLinks.createdBy, userId), isNull(helperLinks.revokedAt), gt(helperLinks.expiresAt, at))).run().changes
+  const offers = tx.update(transfers).set({ state: 'withdrawn', decidedAt: at }).where(and(eq(transfers.teamId, teamId), eq(transfers.createdById, userId), eq(transfers.state, 'open'))).run().changes
+  return links + offers
+}

@@ -1,5 +1,6 @@
-import { getRequestIP, setResponseHeader, type H3Event } from 'h3'
+import { setResponseHeader, type H3Event } from 'h3'
 import { RateLimiterMemory, RateLimiterRes } from 'rate-limiter-flexible'
+import { addressOf } from './addressOf'
 import { fail } from './fail'
 
 /** What is counted together, and how many requests an address may make in a minute. A person typing fast stays far below. */
@@ -20,7 +21,7 @@ export async function limitRequests(event: H3Event, kind: Limited, factor: numbe
   let limiter = limiters.get(key)
   if (!limiter) limiters.set(key, limiter = new RateLimiterMemory({ points: Math.ceil(LIMITS[kind] * factor), duration: 60, keyPrefix: kind }))
   try {
-    await limiter.consume(getRequestIP(event) ?? 'unknown')
+    await limiter.consume(addressOf(event))
   }
   catch (refused) {
     const seconds = refused instanceof RateLimiterRes ? Math.max(1, Math.ceil(refused.msBeforeNext / 1000)) : 60

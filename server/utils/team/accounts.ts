@@ -10,6 +10,7 @@ import { hashOfKey, newRegimenId, newToken } from '../access/linkKey'
 import { actorOf } from '../access/requireMember'
 import { enterSession, forgetSession, newSession, whoIs, type Who } from '../access/signedIn'
 import { database, endSession, endSessions, findUser, findUserByEmail, hasSessions, insertMember, insertSession, insertTeam, insertUser, insertUserToken, knowsDevice, newestTeamOf, takeUserToken, teamsOf, updateUser, writeAudit, WRITING, type Writer } from '../data'
+import { addressOf } from '../http/addressOf'
 import { fail } from '../http/fail'
 import { emailChangeAskMail, emailChangeToldMail, newSignInMail, passwordResetMail } from '../mail/templates'
 import { hasMailService } from '../mail/worker'
@@ -64,7 +65,7 @@ async function meNow(event: H3Event, _sessionId: string, userId: string): Promis
 export function newSignInTold(event: H3Event, user: UserRecord): ((tx: Writer, at: string) => void) | null {
   const device = deviceOf(getRequestHeader(event, 'user-agent'))
   if (!hasSessions(database(), user.id) || knowsDevice(database(), user.id, device)) return null
-  return (tx, at) => queueMail(tx, mailTeamOf(user), user.email, newSignInMail({ name: user.name, when: whenInZone(at, zoneOf(user)), device, address: getRequestIP(event) ?? 'unknown', link: `${serverOrigin(event)}/profile` }), at)
+  return (tx, at) => queueMail(tx, mailTeamOf(user), user.email, newSignInMail({ name: user.name, when: whenInZone(at, zoneOf(user)), device, address: addressOf(event), link: `${serverOrigin(event)}/profile` }), at)
 }
 
 /** A new account with a team of its own. */

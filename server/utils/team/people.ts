@@ -3,7 +3,7 @@ import type { TeamChange } from '#shared/schemas/team'
 import type { Me } from '#shared/types/team'
 import { can, type Role } from '#shared/utils/abilities'
 import { notAllowed, type Member } from '../access/requireMember'
-import { changedFields, countCoordinators, database, endMember, findMemberById, setMemberRole, updateTeam, writeAudit, WRITING } from '../data'
+import { changedFields, countCoordinators, database, endLinksOf, endMember, findMemberById, setMemberRole, updateTeam, writeAudit, WRITING } from '../data'
 import { fail } from '../http/fail'
 import { meOf } from './meOf'
 
@@ -39,7 +39,8 @@ export function removeMember({ teamId, user, role, actor }: Member, id: string):
     if (found.member.role === 'coordinator' && countCoordinators(tx, teamId) === 1) throw lastCoordinator()
     const at = new Date().toISOString()
     endMember(tx, teamId, id, found.user.id, at)
-    writeAudit(tx, { at, actor, teamId, action: isSelf ? 'member.leave' : 'member.remove', objectType: 'member', objectId: id, objectName: found.user.name, before: { role: found.member.role } })
+    const linksEnded = endLinksOf(tx, teamId, found.user.id, at)
+    writeAudit(tx, { at, actor, teamId, action: isSelf ? 'member.leave' : 'member.remove', objectType: 'member', objectId: id, objectName: found.user.name, before: { role: found.member.role }, detail: { linksEnded } })
   }, WRITING)
 }
 

@@ -3,7 +3,7 @@ import { describe, expect, it } from 'vitest'
 import type { Me, Page, SessionRow } from '#shared/types/team'
 import { expectOurShape, withDatabase } from '../api/client'
 import { startServer } from '../server'
-import { Browser, changeSettings, freshEmail, makeTeam, PASSWORD, signedUp, tokenOfMail } from './people'
+import { Browser, changeSettings, freshEmail, makeTeam, PASSWORD, signedUp, tokenOfMail, visitBy } from './people'
 
 /** RFC 4226 and RFC 6238, written here from the standard: the server uses a package. */
 function codeNow(base32: string, at = Date.now()): string {
@@ -317,6 +317,11 @@ describe('people of several teams', () => {
     const { items } = await people.coordinator.done<Page<{ id: string, role: string }>>('GET', '/api/team/members?role=carer')
     await people.coordinator.done('DELETE', `/api/team/members/${items[0]!.id}`)
     for (const browser of [people.carer, second]) expectOurShape(await browser.ask('GET', '/api/regimens'), 403, 'team.none')
+    // Links they made go with them: they may still have the addresses.
+    const { browser: helper } = await visitBy(people.keeper, { room: 'Warm room' })
+    const keeper = (await people.coordinator.done<Page<{ id: string }>>('GET', '/api/team/members?role=keeper')).items[0]!
+    await people.coordinator.done('DELETE', `/api/team/members/${keeper.id}`)
+    expectOurShape(await helper.ask('GET', '/api/help/round'), 401, 'help.closed')
   })
 
   it('cannot leave a team without a coordinator', async () => {
