@@ -5,7 +5,7 @@ import { limitRequests } from '#server/utils/http/limitRequests'
 import { readBodyOf } from '#server/utils/http/readInput'
 import { enter, signUp } from '#server/utils/team/accounts'
 
-defineRouteMeta({ openAPI: { tags: ['Accounts'], summary: 'Makes an account and its first team, and signs in', requestBody: { description: 'SignUpInput', content: { 'application/json': {} } }, responses: { 201: { description: 'Me' }, 400: { description: 'A field is not as expected' }, 422: { description: 'A common password, or an address that has an account' }, 429: { description: 'Too many tries' } } } })
+defineRouteMeta({ openAPI: { tags: ['Accounts'], summary: 'Makes an account and its first team, and signs in', requestBody: { description: 'SignUpInput', content: { 'application/json': {} } }, responses: { 201: { description: 'Me, as GET /api/auth/me answers it' }, 400: { description: 'A field is not as expected' }, 422: { description: 'A common password, or an address that has an account' }, 429: { description: 'Too many tries' } } } })
 
 export default defineEventHandler(async (event): Promise<Me> => {
   await limitRequests(event, 'save', useRuntimeConfig().rateLimitFactor)

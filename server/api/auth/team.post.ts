@@ -8,7 +8,7 @@ import { limitRequests } from '#server/utils/http/limitRequests'
 import { readBodyOf } from '#server/utils/http/readInput'
 import { meOf } from '#server/utils/team/meOf'
 
-defineRouteMeta({ openAPI: { tags: ['Accounts'], summary: 'Switches this browser to another of the person\'s teams', requestBody: { description: 'TeamSwitch', content: { 'application/json': {} } }, responses: { 200: { description: 'Me' }, 401: { description: 'Not signed in' }, 404: { description: 'Not a team of theirs' } } } })
+defineRouteMeta({ openAPI: { tags: ['Accounts'], summary: 'Switches this browser to another of the person\'s teams', requestBody: { description: 'TeamSwitch', content: { 'application/json': {} } }, responses: { 200: { description: 'Me, as GET /api/auth/me answers it' }, 401: { description: 'Not signed in' }, 404: { description: 'Not a team of theirs' } } } })
 
 export default defineEventHandler(async (event): Promise<Me> => {
   await limitRequests(event, 'save', useRuntimeConfig().rateLimitFactor)
